@@ -1,0 +1,63 @@
+import {
+  infiniteQueryOptions,
+  keepPreviousData,
+  queryOptions,
+  useInfiniteQuery,
+  useQuery,
+} from '@tanstack/react-query';
+import { slingsPage, type SlingsQuery, type SlingSummary } from '../../../../shared/schemas/slings';
+import { api } from '../../../lib/apiClient';
+import { slingKeys } from './slingKeys';
+
+export type SlingFilters = Partial<Omit<SlingsQuery, 'limit' | 'cursor' | 'siteId'>> & {
+  siteId?: number | undefined;
+};
+type Page = { items: SlingSummary[]; nextCursor: string | null };
+
+const PAGE_ROWS = 50;
+/** A number on the home page needs no more: beyond it "more than" says enough. */
+const COUNT_ROWS = 100;
+
+/** The filters as they stand in an address or a request; what isn't set is left out. */
+export function toSlingSearch(filters: SlingFilters): string {
+  const search = new URLSearchParams();
+  for (const [name, value] of Object.entries(filters)) {
+    if (value !== undefined && value !== '') search.set(name, String(value));
+  }
+  return search.toString();
+}
+
+function fetchSlings(
+  filters: SlingFilters,
+  limit: number,
+  cursor: string | null,
+  signal: AbortSignal,
+): Promise<Page> {
+  const search = new URLSearchParams(toSlingSearch(filters));
+  search.set('limit', String(limit));
+  if (cursor) search.set('cursor', cursor);
+  return api.get(`/slings?${search}`, slingsPage, { signal });
+}
+
+export const findSlingsOptions = (filters: SlingFilters) =>
+  infiniteQueryOptions({
+    queryKey: slingKeys.list(filters),
+    queryFn: ({ pageParam, signal }) => fetchSlings(filters, PAGE_ROWS, pageParam, signal),
+    initialPageParam: null as string | null,
+    getNextPageParam: (last) => last.nextCursor,
+  });
+
+/** The register by filters, page by page; while other filters load, the old rows stay. */
+export const useSlings = (filters: SlingFilters) =>
+  useInfiniteQuery({ ...findSlingsOptions(filters), placeholderData: keepPreviousData });
+
+export const countSlingsOptions = (filters: SlingFilters) =>
+  queryOptions({
+    queryKey: slingKeys.count(filters),
+    queryFn: async ({ signal }) => {
+      const page = await fetchSlings(filters, COUNT_ROWS, null, signal);
+      return { count: page.items.length, isMore: page.nextCursor !== null };
+    },
+  });
+
+export const useSlingCount = (filters: SlingFilters) => useQuery(countSlingsOptions(filters));
