@@ -2,7 +2,7 @@ import { existsSync, readFileSync } from 'node:fs';
 import path from 'node:path';
 import { randomUUID } from 'node:crypto';
 import compression from 'compression';
-import express, { type Express } from 'express';
+import express, { type Express, type RequestHandler } from 'express';
 import helmet from 'helmet';
 import type { Logger } from 'pino';
 import { pinoHttp } from 'pino-http';
@@ -57,7 +57,8 @@ export function createApp(options: AppOptions): Express {
   app.use(compression());
   if (options.clientDir) serveAssets(app, options.clientDir);
   app.use(['/api'], sessions(sequelize, { secret: options.sessionSecret, isSecure }));
-  app.use(['/api'], authenticator.initialize(), authenticator.session());
+  const initialize: unknown = authenticator.initialize();
+  app.use(['/api'], initialize as RequestHandler, authenticator.session() as RequestHandler);
   app.use(['/api'], limits.general, checkOrigin(publicUrl), (_request, response, next) => {
     response.set('Cache-Control', 'no-store');
     next();

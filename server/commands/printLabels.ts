@@ -1,6 +1,5 @@
 import { randomBytes } from 'node:crypto';
-import { setImmediate as nextTurn } from 'node:timers/promises';
-import { chooseMask, findStock, pickVersion, type QrSymbol } from '../../labels';
+import { chooseMasks, findModuleDots, findStock, pickVersion, type QrSymbol } from '../../labels';
 import { drawTagCode, tagPayload, type TagCode } from '../../shared/domain/tags/tagCode';
 import {
   REPRINT_REASON_FACTS,
@@ -25,15 +24,15 @@ export interface DrawnTag {
 export async function drawTags(
   { publicUrl }: Pick<Services, 'publicUrl'>,
   count: number,
+  source: (n: number) => Uint8Array = randomBytes,
 ): Promise<DrawnTag[]> {
-  const drawn: DrawnTag[] = [];
-  while (drawn.length < count) {
-    const code = drawTagCode((n) => randomBytes(n));
-    const payload = tagPayload(publicUrl, code);
-    drawn.push({ code, payload, symbol: chooseMask(payload) });
-    await nextTurn();
-  }
-  return drawn;
+  const codes = Array.from({ length: count }, () => drawTagCode((n) => source(n)));
+  const tags = codes.map((code) => ({ code, payload: tagPayload(publicUrl, code) }));
+  const symbols = await chooseMasks(tags.map((tag) => tag.payload));
+  return tags.flatMap((tag, index) => {
+    const symbol = symbols[index];
+    return symbol ? [{ ...tag, symbol }] : [];
+  });
 }
 
 /** What the person should know before the labels go on slings. */
@@ -61,6 +60,13 @@ export async function printLabels(
   const { transaction, at, user } = context;
   const stock = findStock(request.stock);
   if (!stock) throw invalidField('stock', 'There is no such stock of labels.');
+  const [first] = drawn;
+  if (first && findModuleDots(stock, first.symbol.version) === null) {
+    throw invalidField(
+      'stock',
+      'The public address is too long for a code on this stock: choose a larger label.',
+    );
+  }
   const slings = await lockAll(context, request.slingIds);
   const run = await LabelRun.create(
     {

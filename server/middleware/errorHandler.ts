@@ -70,7 +70,7 @@ export function sendProblem(request: Request, response: Response, error: AppErro
     status,
     detail: error.message,
     ...error.extras,
-    requestId: String(request.id),
+    ...(typeof request.id === 'string' ? { requestId: request.id } : {}),
   };
   if (error.retryAfterSeconds !== undefined) response.set('Retry-After', String(error.retryAfterSeconds));
   response.status(status).type('application/problem+json').send(JSON.stringify(problem));

@@ -1,4 +1,4 @@
-import { createDocument, type ZodOpenApiOperationObject, type ZodOpenApiPathsObject } from 'zod-openapi';
+import { createDocument, type ZodOpenApiOperationObject } from 'zod-openapi';
 import { z } from 'zod';
 import { problemSchema } from '../../shared/errors';
 import { ROUTE_ACCESS, type Access } from '../../shared/domain/access/routes';
@@ -20,7 +20,7 @@ export function buildOpenApi(routes: readonly Route[]): object {
       description:
         'Identity, inspection and quarantine of lifting slings. A record-keeping and planning aid: it does not replace inspection by a competent or qualified person, the maker’s instructions, or local codes.',
     },
-    paths: paths as ZodOpenApiPathsObject,
+    paths,
   });
 }
 

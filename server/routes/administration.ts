@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import type { z } from 'zod';
 import { idParam, listOf, pageOf, pageQuery } from '../../shared/schemas/common';
 import {
   createUserRequest,

@@ -22,7 +22,7 @@ export function Component(): ReactNode {
   // A label of ours that is void or unknown can still be reported; a code that is none of ours can't
   const isOurs = parseTagCode(code).ok;
   return (
-    <main className="mx-auto min-h-dvh max-w-2xl pb-10">
+    <main className="min-h-dvh pb-10">
       <h1 className="sr-only">Label {formatTagCode(code)}</h1>
       {sent === null ? (
         <TagAnswer
@@ -37,7 +37,7 @@ export function Component(): ReactNode {
           lines={['Your report was received. Thank you.']}
         />
       )}
-      <div className="flex flex-col gap-6 px-4 pt-5 sm:px-8">
+      <div className="mx-auto flex max-w-2xl flex-col gap-6 px-4 pt-5 sm:px-8">
         {sent === null && isOurs && (
           <ReportPanel
             code={code}
@@ -78,13 +78,13 @@ function Caution({ code }: { code: string }): ReactNode {
 
 function Waiting(): ReactNode {
   return (
-    <main className="mx-auto max-w-2xl">
+    <main>
       <h1 className="sr-only">Looking the label up</h1>
       <p role="status" className="sr-only">
         Looking the label up
       </p>
       <Skeleton className="h-[50dvh] w-full rounded-none!" />
-      <div className="px-4 pt-5 sm:px-8">
+      <div className="mx-auto max-w-2xl px-4 pt-5 sm:px-8">
         <Skeleton className="h-16 w-full" />
       </div>
     </main>

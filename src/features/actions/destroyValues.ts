@@ -10,7 +10,8 @@ const destroyValues = z.object({
   method: z.string().min(1, 'How was it destroyed?'),
   otherMethod: text(LIMITS.name),
   photoIds: z.array(fileIdSchema).min(1, 'A photo of the destroyed sling is needed.'),
-  fates: z.record(z.string(), z.enum(['', 'destroyed', 'salvaged'])),
+  /** By part; null while nothing is chosen, as a form's radios have it. */
+  fates: z.record(z.string(), z.enum(['destroyed', 'salvaged']).nullable()),
 });
 export type DestroyValues = z.infer<typeof destroyValues>;
 

@@ -17,9 +17,13 @@ const POSITION_WORDS = { upper: 'upper end', lower: 'lower end', other: 'elsewhe
 
 /** Every fitting, and each leg of a sling with several; a single leg is the sling itself. */
 export function listParts(sling: Pick<Sling, 'fittings' | 'legs'>): Part[] {
-  const fittings = sling.fittings.map(({ id, type, position, sizeMm, detachable }): Part => ({
+  const names = sling.fittings.map(
+    ({ type, position, sizeMm }) =>
+      `${FITTING_NAMES[type]}${sizeMm === undefined ? '' : `, ${sizeMm} mm`}, ${POSITION_WORDS[position]}`,
+  );
+  const fittings = sling.fittings.map(({ id, detachable }, i): Part => ({
     key: `fitting${id}`,
-    name: `${FITTING_NAMES[type]}${sizeMm === undefined ? '' : `, ${sizeMm} mm`}, ${POSITION_WORDS[position]}`,
+    name: tellApart(names, i),
     about: { fittingId: id },
     isDetachable: detachable,
   }));
@@ -32,10 +36,18 @@ export function listParts(sling: Pick<Sling, 'fittings' | 'legs'>): Part[] {
   return [...fittings, ...legs];
 }
 
+/** Alike fittings by their place in the record: "Hook, lower end (2 of 4)". */
+function tellApart(names: readonly string[], index: number): string {
+  const name = names[index] ?? '';
+  const alike = names.filter((each) => each === name).length;
+  if (alike < 2) return name;
+  return `${name} (${names.slice(0, index + 1).filter((each) => each === name).length} of ${alike})`;
+}
+
 /** The fates as the API takes them; a part that cannot be taken off is destroyed. */
 export function toFates(
   parts: readonly Part[],
-  chosen: Readonly<Record<string, string>>,
+  chosen: Readonly<Record<string, Fate | null>>,
 ): { fittings: { fittingId: number; fate: Fate }[]; legs: { leg: number; fate: Fate }[] } {
   const fateOf = (part: Part): Fate =>
     part.isDetachable && chosen[part.key] === 'salvaged' ? 'salvaged' : 'destroyed';

@@ -52,64 +52,72 @@ export function HoldForm({ sling, armedReason, onHeld }: HoldFormProps): ReactNo
   }
 
   return (
-    <form onSubmit={hold} noValidate className="flex flex-col gap-5">
-      <ChoiceTiles
-        legend="Why?"
-        columns={3}
-        hint="Tap one or more, then Hold."
-        error={isPressed && !hasReason ? 'Tap at least one reason.' : undefined}
-        selected={values.codes}
-        options={CHOOSABLE_REASONS.map((code) => ({
-          value: code,
-          label: REASON_FACTS[code].name,
-          drawing: <ReasonDrawing code={code} />,
-        }))}
-        input={{
-          name: 'reasons',
-          onChange: ({ target }) => {
-            const code = target.value;
-            if (isChoosable(code)) update((now) => toggleReason(now, code));
-          },
-        }}
-      />
-      {needsNote(values) && (
-        <TextField
-          label="What is it?"
-          maxLength={LIMITS.note}
-          value={values.note}
-          onChange={({ target }) => update((now) => ({ ...now, note: target.value }))}
-          error={isPressed && isNoteMissing ? 'Say what it is.' : undefined}
+    <form
+      onSubmit={hold}
+      noValidate
+      className="grid gap-5 lg:grid-cols-[minmax(0,1fr)_20rem] lg:items-start lg:gap-8"
+    >
+      <div className="flex flex-col gap-5">
+        <ChoiceTiles
+          legend="Why?"
+          columns={3}
+          hint="Tap one or more, then Hold."
+          error={isPressed && !hasReason ? 'Tap at least one reason.' : undefined}
+          selected={values.codes}
+          options={CHOOSABLE_REASONS.map((code) => ({
+            value: code,
+            label: REASON_FACTS[code].name,
+            drawing: <ReasonDrawing code={code} />,
+          }))}
+          input={{
+            name: 'reasons',
+            onChange: ({ target }) => {
+              const code = target.value;
+              if (isChoosable(code)) update((now) => toggleReason(now, code));
+            },
+          }}
         />
-      )}
-      <PhotoPicker
-        label="Photo"
-        hint="You may leave it out, or add it after the hold."
-        value={values.photoIds}
-        onChange={(photoIds) => update((now) => ({ ...now, photoIds }))}
-        onBusyChange={setIsSending}
-      />
-      <ProblemNotice problem={act.error} />
-      {act.error && (
-        <p className="font-medium">
-          The hold is not recorded yet. Keep the sling out of use; what you chose is kept here.
-        </p>
-      )}
-      <ActionBar>
-        <Button
-          type="submit"
-          tone="danger"
-          className="min-h-16 text-xl lg:min-w-72"
-          pending={act.isPending}
-          pendingText={ACTION_WORDS.hold.pending}
-        >
-          {values.codes.length > 1 ? `Hold it: ${formatCount(values.codes.length, 'reason')}` : 'Hold it'}
-        </Button>
-        {isSending && (
-          <p role="status" className="self-center text-[0.9375rem] text-muted">
-            A photo is still being sent. You may hold without it and add it after.
+        {needsNote(values) && (
+          <TextField
+            label="What is it?"
+            maxLength={LIMITS.note}
+            value={values.note}
+            onChange={({ target }) => update((now) => ({ ...now, note: target.value }))}
+            error={isPressed && isNoteMissing ? 'Say what it is.' : undefined}
+          />
+        )}
+      </div>
+      <div className="contents lg:flex lg:flex-col lg:gap-5">
+        <PhotoPicker
+          label="Photo"
+          hint="You may leave it out, or add it after the hold."
+          value={values.photoIds}
+          onChange={(photoIds) => update((now) => ({ ...now, photoIds }))}
+          onBusyChange={setIsSending}
+        />
+        <ProblemNotice problem={act.error} />
+        {act.error && (
+          <p className="font-medium">
+            The hold is not recorded yet. Keep the sling out of use; what you chose is kept here.
           </p>
         )}
-      </ActionBar>
+        <ActionBar>
+          <Button
+            type="submit"
+            tone="danger"
+            className="min-h-16 text-xl lg:w-full"
+            pending={act.isPending}
+            pendingText={ACTION_WORDS.hold.pending}
+          >
+            {values.codes.length > 1 ? `Hold it: ${formatCount(values.codes.length, 'reason')}` : 'Hold it'}
+          </Button>
+          {isSending && (
+            <p role="status" className="self-center text-[0.9375rem] text-muted">
+              A photo is still being sent. You may hold without it and add it after.
+            </p>
+          )}
+        </ActionBar>
+      </div>
     </form>
   );
 }

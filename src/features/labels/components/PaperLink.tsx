@@ -19,6 +19,7 @@ export function PaperLink({
       to={to}
       tone={tone}
       reloadDocument
+      className="whitespace-nowrap"
       {...(download ? { download } : { target: '_blank', rel: 'noreferrer' })}
     >
       {children}

@@ -78,6 +78,7 @@ export function UserForm(props: UserFormProps): ReactNode {
           <ChoiceTiles
             legend="Roles"
             hideLegend
+            columns={1}
             options={ROLES.map((role) => ({
               value: role,
               label: ROLE_NAMES[role],

@@ -28,6 +28,11 @@ export function UserList({
         >
           <span className="underline underline-offset-4">{user.name}</span>
           <span className="text-[0.9375rem] font-normal break-all text-muted">{user.email}</span>
+          {!isPlainlyActive(user) && (
+            <span className="text-[0.9375rem] font-medium text-ink md:hidden">
+              {describeAccount(user, today)}
+            </span>
+          )}
         </Link>
       ),
     },
@@ -37,6 +42,8 @@ export function UserList({
   ];
   return <DataTable caption="Users" columns={columns} rows={users} rowKey={(user) => user.id} />;
 }
+
+const isPlainlyActive = ({ endsOn, hasPassword }: User): boolean => hasPassword && endsOn === null;
 
 function nameSites(user: User, sites: readonly Site[]): string {
   const names = sites.filter(({ id }) => user.siteIds.includes(id)).map(({ name }) => name);

@@ -1,5 +1,6 @@
 import { useEffect, useState } from 'react';
-import { loadLabelReader, type LabelReader } from '../reader/labelReader';
+import type { LabelReader } from '../reader/labelReader';
+import { loadLabelReader } from '../reader/loadLabelReader';
 
 /** The reader, once its code has arrived; `hasFailed` when it didn't (the network went away meanwhile). */
 export function useLabelReader(): { reader: LabelReader | null; hasFailed: boolean } {

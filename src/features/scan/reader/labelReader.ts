@@ -48,9 +48,3 @@ export class CameraProblemError extends Error {
 export class PhotoError extends Error {
   override name = 'PhotoError';
 }
-
-/** Fetched only when the scan page is open: nobody else needs its weight. */
-export async function loadLabelReader(): Promise<LabelReader> {
-  const { createBrowserLabelReader } = await import('./browserLabelReader');
-  return createBrowserLabelReader();
-}

@@ -14,7 +14,7 @@ const FACTORS: Record<LoadUnit | LengthUnit, { digits: bigint; decimals: number 
 
 /**
  * A figure as typed, in kg or mm, without binary noise: "2.01" t is 2010, not 2009.9999999999998.
- * @param figure plain or with thousands commas, as `parseTypedNumber` takes it
+ * @param figure plain or with thousands commas, as `parseTypedNumber` takes it, or a fraction such as "5/8"
  * @returns null when it isn't a number
  */
 export function convertExactly(figure: string, unit: LoadUnit | LengthUnit): number | null {
@@ -29,8 +29,17 @@ export function convertExactly(figure: string, unit: LoadUnit | LengthUnit): num
   return Number(`${padded.slice(0, point)}.${padded.slice(point)}0`);
 }
 
-/** The same reading of commas as `parseTypedNumber`, kept as digits. */
+/** A whole and a fraction as sizes in inches are written: "5/8", "1 1/2", "1-1/2". Halvings only: they end as decimals. */
+const FRACTION = /^(?:(\d{1,6})[ -])?(\d{1,3})\/(2|4|8|16|32|64)$/;
+
+/** The same reading of commas as `parseTypedNumber`, kept as digits, and fractions besides. */
 function toPlainDecimal(figure: string): string | null {
+  const fraction = FRACTION.exec(figure.trim());
+  if (fraction) {
+    const [, whole = '0', top = '', bottom = ''] = fraction;
+    // Exact: halvings of small whole numbers have no binary noise
+    return String(Number(whole) + Number(top) / Number(bottom));
+  }
   const bare = figure.trim().replace(/[\s\u00a0]/g, '');
   if (/^\d{1,3}(,\d{3})+(\.\d+)?$/.test(bare)) return bare.replaceAll(',', '');
   if (/^\d+([.,]\d+)?$/.test(bare)) return bare.replace(',', '.');

@@ -16,7 +16,10 @@ export function BuildSection(): ReactNode {
   const { control } = useFormContext<SlingFormValues>();
   const kind = useWatch({ control, name: 'kind' });
   return (
-    <FormSection title="Build" about="Type each figure in the unit that you read it in.">
+    <FormSection
+      title="Build"
+      about="Type each figure in the unit that you read it in. Fractions such as 5/8 or 1 1/2 are read too."
+    >
       <FieldRow>
         <FormSelect
           name="legs"

@@ -16,6 +16,13 @@ interface FirstStep {
 
 const STEPS: readonly FirstStep[] = [
   {
+    title: 'Name the racks and cages',
+    text: 'Each site needs a cage at least: a held sling is brought there.',
+    to: paths.sites,
+    needs: 'POST /api/locations',
+    who: 'An administrator',
+  },
+  {
     title: 'Bring the people in',
     text: 'An account for each storekeeper, inspector and manager, with site, roles and designations.',
     to: paths.users,
