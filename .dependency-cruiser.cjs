@@ -125,6 +125,7 @@ module.exports = {
       path: '^src/(features|app)/',
     }),
     ...layer('routes', [
+      'openapi',
       'routing',
       'middleware',
       'policies',

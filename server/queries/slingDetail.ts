@@ -32,7 +32,8 @@ export async function getSling(
   const at = context.now();
   const [parts, days] = await Promise.all([
     loadSlingParts(record, transaction),
-    findToday([record.siteId], at),
+    // In the caller's transaction: a second connection from the pool may never come while others wait for this one.
+    findToday([record.siteId], at, transaction),
   ]);
   const names = await findNames(parts.openReasons, transaction);
   const today = days.get(record.siteId) ?? at.toISOString().slice(0, 10);

@@ -67,8 +67,16 @@ export async function findSummary(
 }
 
 /** Today's date at each of these sites. */
-export async function findToday(siteIds: readonly number[], at: Date): Promise<Map<number, string>> {
-  const sites = await Site.findAll({ attributes: ['id', 'timeZone'], where: { id: [...new Set(siteIds)] } });
+export async function findToday(
+  siteIds: readonly number[],
+  at: Date,
+  transaction?: Transaction,
+): Promise<Map<number, string>> {
+  const sites = await Site.findAll({
+    attributes: ['id', 'timeZone'],
+    where: { id: [...new Set(siteIds)] },
+    ...(transaction ? { transaction } : {}),
+  });
   return new Map(sites.map((site) => [site.id, dayInZone(at, site.timeZone)]));
 }
 

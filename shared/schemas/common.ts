@@ -2,6 +2,8 @@ import { z } from 'zod';
 import { LIMITS } from '../limits';
 
 const CONTROL = /[\u0000-\u0008\u000B\u000C\u000E-\u001F\u007F]/u;
+/** Half a character: no database keeps it, so the ledger's hash would not fit what is read back. */
+const HALF_CHARACTER = /\p{Surrogate}/u;
 
 /** A line or text that a person types: trimmed, no control characters, any script and emoji welcome. */
 export function text(max: number) {
@@ -9,7 +11,8 @@ export function text(max: number) {
     .string()
     .max(max, `At most ${max} characters.`)
     .refine((value) => !CONTROL.test(value), 'Control characters are not allowed.')
-    .transform((value) => value.trim());
+    .refine((value) => !HALF_CHARACTER.test(value), 'A character in it is broken.')
+    .overwrite((value) => value.trim());
 }
 export function requiredText(max: number, message = 'Please fill this in.') {
   return text(max).refine((value) => value.length > 0, message);

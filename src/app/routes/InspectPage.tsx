@@ -1,4 +1,4 @@
-import { useState, type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import { useParams, useSearchParams } from 'react-router-dom';
 import { mayCall } from '../../../shared/domain/access/routes';
 import { STATE_FACTS } from '../../../shared/domain/lifecycle/states';
@@ -16,29 +16,35 @@ import { InspectionResult } from '../../features/inspections/components/Inspecti
 import { TypeTabs } from '../../features/inspections/components/TypeTabs';
 import { listTypes } from '../../features/inspections/inspectionTypes';
 import { useSling } from '../../features/slings/api/getSling';
+import { useInspections } from '../../features/slings/api/listInspections';
 import { useLocations, useSites } from '../../features/slings/api/places';
 import { useKeepSling } from '../../features/slings/hooks/useKeepSling';
 import { useToday } from '../../features/slings/hooks/useToday';
 import { useUser } from '../../lib/session';
 
+/** `?recorded=` shows the inspection that was just made, also after a reload; else one is made, of `?type=`. */
 export function Component(): ReactNode {
   const id = Number(useParams().id);
+  const [search, setSearch] = useSearchParams();
   const query = useSling(id);
-  const [answer, setAnswer] = useState<CreateInspectionResponse | null>(null);
   const sling = query.data;
+  const recorded = search.get('recorded');
   return (
     <div className="max-w-4xl">
       <PageHeader
-        title={answer ? 'Inspection recorded' : 'Inspect'}
+        title={recorded ? 'Inspection recorded' : 'Inspect'}
         back={{ to: paths.sling(id), label: sling ? `Sling ${sling.number}` : 'The sling' }}
       />
       {sling ? (
         <>
           <SlingLine sling={sling} />
-          {answer ? (
-            <Result answer={answer} sling={sling} onReload={query.refetch} />
+          {recorded ? (
+            <Result inspectionId={Number(recorded)} sling={sling} onReload={query.refetch} />
           ) : (
-            <Examination sling={sling} onDone={setAnswer} />
+            <Examination
+              sling={sling}
+              onDone={({ inspection }) => setSearch({ recorded: String(inspection.id) }, { replace: true })}
+            />
           )}
         </>
       ) : query.error ? (
@@ -65,8 +71,8 @@ function Examination({
   const { onSuccess: keep } = useKeepSling(sling.id);
   const types = listTypes(sling);
   const type = types.find((each) => each === search.get('type')) ?? types[0];
-  if (!mayCall('POST /api/slings/:id/inspections', roles)) return <NotAnInspector sling={sling} />;
   if (!type) return <NothingToInspect sling={sling} />;
+  if (!mayCall('POST /api/slings/:id/inspections', roles)) return <NotAnInspector sling={sling} />;
   const site = sites.data?.items.find(({ id }) => id === sling.siteId);
   const error = criteria.error ?? sites.error;
   if (error) {
@@ -96,23 +102,30 @@ function Examination({
 
 /** The verdict stays as it was given; the sling below it is the one of now, also after it went to the cage. */
 function Result({
-  answer,
+  inspectionId,
   sling,
   onReload,
 }: {
-  answer: CreateInspectionResponse;
+  inspectionId: number;
   sling: Sling;
   onReload: () => Promise<unknown>;
 }): ReactNode {
+  const inspections = useInspections(sling.id);
   const { onSuccess: keep } = useKeepSling(sling.id);
   const locations = useLocations().data?.items ?? [];
+  const inspection = inspections.data?.items.find(({ id }) => id === inspectionId);
+  if (!inspection) {
+    if (inspections.error)
+      return <ErrorState error={inspections.error} onRetry={() => void inspections.refetch()} />;
+    return inspections.isFetching ? <SkeletonLines lines={6} /> : <NotOfThisSling sling={sling} />;
+  }
   return (
     <InspectionResult
-      answer={{ ...answer, sling }}
+      answer={{ inspection, sling }}
       next={
         <AfterInspection
           sling={sling}
-          verdict={answer.inspection.verdict}
+          verdict={inspection.verdict}
           locations={locations}
           onReload={onReload}
           onDone={({ sling: secured }) => void keep(secured)}
@@ -123,13 +136,29 @@ function Result({
 }
 
 function NotAnInspector({ sling }: { sling: Sling }): ReactNode {
+  const canHold = sling.allowedActions.some(({ action, open }) => action === 'hold' && open);
   return (
     <EmptyState
       title="An inspector does this"
-      action={<LinkButton to={paths.hold(sling.id)}>Hold it instead</LinkButton>}
+      action={
+        <LinkButton to={canHold ? paths.hold(sling.id) : paths.sling(sling.id)}>
+          {canHold ? 'Hold it instead' : 'Back to the sling'}
+        </LinkButton>
+      }
     >
       Inspections are made by a person with the role inspector. If you see damage, hold the sling: an
       inspector looks at it then.
+    </EmptyState>
+  );
+}
+
+function NotOfThisSling({ sling }: { sling: Sling }): ReactNode {
+  return (
+    <EmptyState
+      title="No such inspection of this sling"
+      action={<LinkButton to={paths.sling(sling.id)}>Back to the sling</LinkButton>}
+    >
+      The record lists every inspection that was made.
     </EmptyState>
   );
 }

@@ -85,7 +85,7 @@ export function DestroySummary({
         error={isAsked && password === '' ? 'Your password is needed.' : passwordError}
         className="max-w-md"
       />
-      <ActProblem problem={act.error} onReload={onReload} onDismiss={act.reset} />
+      <ActProblem problem={passwordError ? null : act.error} onReload={onReload} onDismiss={act.reset} />
       <ActionBar>
         <Button tone="quiet" onClick={onBack} disabled={act.isPending}>
           Back to change it

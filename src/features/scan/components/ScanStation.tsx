@@ -3,7 +3,7 @@ import { useHandheldScanner } from '../../../lib/handheldScanner';
 import { playScanTone, unlockSounds } from '../../../lib/sounds';
 import { useLabelReader } from '../hooks/useLabelReader';
 import { useReading } from '../hooks/useReading';
-import { understand, wayOfAddress, type ReadWay, type Refusal } from '../reading';
+import { understand, wayOfAddress, type ReadWay, type Refusal, type Understood } from '../reading';
 import { createRepeatGuard } from '../repeatGuard';
 import { CameraView } from './CameraView';
 import { CodeForm } from './CodeForm';
@@ -21,10 +21,8 @@ export function ScanStation({ addressCode }: { addressCode: string | null }): Re
   const { reading, setReading } = useReading();
   const [refusal, setRefusal] = useState<Refusal | null>(null);
   const [guard] = useState(createRepeatGuard);
-  const lastCameraText = useRef('');
 
-  const take = (text: string, via: ReadWay): void => {
-    const understood = understand(text, via, Date.now());
+  const answer = (understood: Understood): void => {
     if (understood.ok) {
       setRefusal(null);
       setReading(understood.reading);
@@ -34,13 +32,14 @@ export function ScanStation({ addressCode }: { addressCode: string | null }): Re
       playScanTone('unknown');
     }
   };
+  const take = (text: string, via: ReadWay): void => answer(understand(text, via, Date.now()));
   const takeFromCamera = (text: string): void => {
-    if (reading || !guard.isNew(text, performance.now())) return;
-    lastCameraText.current = text;
-    take(text, 'camera');
+    if (reading) return;
+    const understood = understand(text, 'camera', Date.now());
+    if (guard.isNew(understood.ok ? understood.reading.code : text, performance.now())) answer(understood);
   };
   const scanNext = (): void => {
-    guard.settle(lastCameraText.current, performance.now());
+    if (reading) guard.settle(reading.code, performance.now());
     setReading(null);
   };
 

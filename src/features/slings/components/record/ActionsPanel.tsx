@@ -7,12 +7,13 @@ import { useUser } from '../../../../lib/session';
 import { findLikelyStep } from '../../record/likelyStep';
 import { listActions, type ActionLine } from '../../record/listActions';
 
-/** What can be done with the sling now, and what is missing for the rest. Hold stands at the plate, apart from destroy. */
+/** What can be done with the sling now, and what is missing for the rest. Destroy comes last and alone, far from hold. */
 export function ActionsPanel({ sling }: { sling: Sling }): ReactNode {
   const user = useUser();
   const offered = findLikelyStep(sling, user)?.to;
   const { open: all, elsewhere, closed } = listActions(sling);
-  const open = all.filter(({ action }) => paths.act(sling.id, action) !== offered);
+  const here = all.filter(({ action }) => paths.act(sling.id, action) !== offered);
+  const open = here.filter(({ action }) => action !== 'destroy');
   if (all.length + elsewhere.length + closed.length === 0) return null;
   return (
     <Panel title="What can be done">
@@ -22,7 +23,7 @@ export function ActionsPanel({ sling }: { sling: Sling }): ReactNode {
             <LinkButton
               key={action}
               to={paths.act(sling.id, action)}
-              tone={action === 'destroy' ? 'danger' : 'quiet'}
+              tone="quiet"
               className="max-sm:flex-1 max-sm:basis-40"
             >
               {name}
@@ -41,6 +42,13 @@ export function ActionsPanel({ sling }: { sling: Sling }): ReactNode {
         </>
       )}
       {elsewhere.length > 0 && <ClosedActions lines={elsewhere.map(explainElsewhere)} />}
+      {here.length > open.length && (
+        <p className="no-print border-t border-rule pt-3">
+          <LinkButton to={paths.act(sling.id, 'destroy')} tone="danger">
+            Record its destruction
+          </LinkButton>
+        </p>
+      )}
     </Panel>
   );
 }

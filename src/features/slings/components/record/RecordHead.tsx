@@ -13,7 +13,7 @@ import { findLikelyStep, isOpen } from '../../record/likelyStep';
 
 const INSPECTED_STATES: readonly Sling['state'][] = ['received', 'in_service', 'held', 'returned'];
 
-/** Plate and band as one, then hold: always one tap away, whatever else is open. */
+/** Plate and band as one, then hold: one tap away. A held sling takes more reasons at the open ones, away from destroy. */
 export function RecordHead({ sling }: { sling: Sling }): ReactNode {
   const user = useUser();
   const places = usePlaceNames();
@@ -39,13 +39,9 @@ export function RecordHead({ sling }: { sling: Sling }): ReactNode {
         {describeState(sling, { now: new Date(), today, timeZone: places.timeZone(sling.siteId) })}
       </Band>
       <div className="no-print mt-3 flex flex-wrap gap-3">
-        {isOpen(sling, 'hold') && (
-          <LinkButton
-            to={paths.hold(sling.id)}
-            tone={sling.state === 'held' ? 'quiet' : 'danger'}
-            className="max-sm:flex-1"
-          >
-            {sling.state === 'held' ? 'Add a reason to the hold' : 'Hold it'}
+        {isOpen(sling, 'hold') && sling.state !== 'held' && (
+          <LinkButton to={paths.hold(sling.id)} tone="danger" className="max-sm:flex-1">
+            Hold it
           </LinkButton>
         )}
         {mayInspect && !step?.to.startsWith(inspectPath) && (

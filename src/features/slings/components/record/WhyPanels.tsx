@@ -2,8 +2,11 @@ import type { ReactNode } from 'react';
 import { REASON_FACTS } from '../../../../../shared/domain/lifecycle/reasons';
 import type { OpenReasonView, Sling } from '../../../../../shared/schemas/slings';
 import { ReasonDrawing } from '../../../../components/sling/ReasonDrawing';
+import { LinkButton } from '../../../../components/ui/Button';
 import { Panel } from '../../../../components/ui/Panel';
+import { paths } from '../../../../config/paths';
 import { formatDateTime } from '../../../../lib/format';
+import { isOpen } from '../../record/likelyStep';
 
 /** Each thing that makes the answer DO NOT USE, so that nobody has to guess which one. */
 export function MayNotUsePanel({ sling }: { sling: Sling }): ReactNode {
@@ -23,14 +26,21 @@ export function MayNotUsePanel({ sling }: { sling: Sling }): ReactNode {
 
 /** Open reasons of the hold, each with what clears it. */
 export function ReasonsPanel({ sling, timeZone }: { sling: Sling; timeZone: string | undefined }): ReactNode {
-  if (sling.openReasons.length === 0) return null;
+  const mayAdd = sling.state === 'held' && isOpen(sling, 'hold');
+  if (sling.openReasons.length === 0 && !mayAdd) return null;
   return (
     <Panel title={sling.openReasons.length === 1 ? 'Open reason' : 'Open reasons'}>
+      {sling.openReasons.length === 0 && <p className="text-muted">No reason is open.</p>}
       <ul className="flex flex-col">
         {sling.openReasons.map((reason) => (
           <ReasonLine key={reason.id} reason={reason} timeZone={timeZone} />
         ))}
       </ul>
+      {mayAdd && (
+        <LinkButton to={paths.hold(sling.id)} tone="quiet" className="no-print">
+          Add a reason to the hold
+        </LinkButton>
+      )}
     </Panel>
   );
 }
