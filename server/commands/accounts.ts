@@ -110,6 +110,9 @@ export async function updateUser(
   if (context.user?.id === id && !roles.includes('admin')) {
     throw invalidField('roles', 'You cannot take the administrator’s role from yourself.');
   }
+  if (context.user?.id === id && fields.endsOn && fields.endsOn < context.at.toISOString().slice(0, 10)) {
+    throw invalidField('endsOn', 'You cannot end your own account: you would be locked out at once.');
+  }
   await user.update(fields, { transaction });
   if (siteIds) await setSites(context, id, siteIds);
   if (designations) await setDesignations(context, id, designations);

@@ -91,7 +91,8 @@ async function applyOutcome(
   }
   await appendLedger(context, sling, { type: 'outcome_recorded', data });
   const reason = findReasonOnReturn(facts);
-  const isHere = facts.state === 'held' || facts.state === 'returned';
+  // In service too: what turns out unfit after all is not used for another hour.
+  const isHere = facts.state === 'held' || facts.state === 'returned' || facts.state === 'in_service';
   const isNew = !facts.openReasons.some((open) => open.code === reason);
   if (isLate && isHere && reason && isNew) {
     await placeHold(context, sling, { reasons: [{ code: reason, placedBy: null }], photos: [] });

@@ -11,7 +11,8 @@ const addressOf = (request: Request): string => ipKeyGenerator(request.ip ?? 'un
 const accountOf = (request: Request): string => {
   const body: unknown = request.body;
   const email = typeof body === 'object' && body !== null && 'email' in body ? body.email : '';
-  return `${addressOf(request)}|${String(email).trim().toLowerCase().slice(0, 254)}`;
+  const account = typeof email === 'string' ? email.trim().toLowerCase().slice(0, 254) : '';
+  return `${addressOf(request)}|${account}`;
 };
 const personOf = (request: Request): string => {
   const user = findUser(request);

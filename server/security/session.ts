@@ -1,7 +1,7 @@
 import connectSessionSequelize from 'connect-session-sequelize';
 import session from 'express-session';
 import type { RequestHandler } from 'express';
-import { DataTypes, QueryTypes, type Sequelize } from 'sequelize';
+import { DataTypes, literal, Op, QueryTypes, type Sequelize } from 'sequelize';
 
 /** A working day with some reserve; then the person signs in again. */
 const SESSION_LIFE_MS = 14 * 3_600_000;
@@ -28,7 +28,12 @@ export function sessions(
       createdAt: DataTypes.DATE(3),
       updatedAt: DataTypes.DATE(3),
     },
-    { tableName: 'sessions', timestamps: true },
+    {
+      tableName: 'sessions',
+      timestamps: true,
+      // The store itself never looks at the date: a copied cookie would work until the row is swept away.
+      defaultScope: { where: { expires: { [Op.gt]: literal('UTC_TIMESTAMP(3)') } } },
+    },
   );
   const SequelizeStore = connectSessionSequelize(session.Store);
   const storeOptions = {

@@ -2,7 +2,13 @@ import { existsSync } from 'node:fs';
 import http from 'node:http';
 import type { AddressInfo } from 'node:net';
 import path from 'node:path';
-import { chromium, type Browser, type BrowserContext, type Page } from 'playwright-core';
+import {
+  chromium,
+  type Browser,
+  type BrowserContext,
+  type BrowserContextOptions,
+  type Page,
+} from 'playwright-core';
 import { DEMO_DOMAIN, DEMO_PASSWORD } from '../../server/demo/people';
 import { openTestStore, type TestStore } from './testStore';
 
@@ -13,12 +19,13 @@ export interface ServedStore {
 }
 
 /** A store that serves the built client on a port of its own, so that a real browser can use it. */
-export async function serveTestStore(): Promise<ServedStore> {
-  const clientDir = path.resolve(import.meta.dirname, '../../dist');
-  if (!existsSync(path.join(clientDir, 'index.html'))) throw new Error('Build the client first: npm test does.');
+export async function serveTestStore(options: { isEmpty?: boolean } = {}): Promise<ServedStore> {
+  const clientDir = process.env.E2E_CLIENT_DIR ?? path.resolve(import.meta.dirname, '../../dist');
+  if (!existsSync(path.join(clientDir, 'index.html')))
+    throw new Error('Build the client first: npm test does.');
   const port = await findFreePort();
   const origin = `http://127.0.0.1:${port}`;
-  const store = await openTestStore({ publicUrl: origin, clientDir });
+  const store = await openTestStore({ ...options, publicUrl: origin, clientDir });
   const server = http.createServer(store.app);
   await new Promise<void>((resolve) => server.listen(port, '127.0.0.1', resolve));
   return {
@@ -42,17 +49,23 @@ function findFreePort(): Promise<number> {
   });
 }
 
-/** Debian's Chromium; with `video`, its fake camera shows that file (Y4M). */
-export function launchBrowser(options: { video?: string } = {}): Promise<Browser> {
+export interface LaunchOptions {
+  /** What the fake camera shows (Y4M); without it, Chromium's own moving test picture. */
+  video?: string;
+  /** `none`: the machine has no camera at all. */
+  camera?: 'fake' | 'none';
+}
+
+/** Debian's Chromium. Whether a page may use the camera is the window's affair (`openWindow`). */
+export function launchBrowser({ video, camera = 'fake' }: LaunchOptions = {}): Promise<Browser> {
   return chromium.launch({
     executablePath: '/usr/bin/chromium',
     args: [
       '--no-sandbox',
       '--disable-quic',
       '--disable-background-networking',
-      '--use-fake-device-for-media-stream',
-      '--use-fake-ui-for-media-stream',
-      ...(options.video ? [`--use-file-for-fake-video-capture=${options.video}`] : []),
+      ...(camera === 'fake' ? ['--use-fake-device-for-media-stream'] : []),
+      ...(video ? [`--use-file-for-fake-video-capture=${video}`] : []),
     ],
   });
 }
@@ -60,24 +73,66 @@ export function launchBrowser(options: { video?: string } = {}): Promise<Browser
 export const PHONE = { width: 390, height: 844 };
 export const DESK = { width: 1440, height: 900 };
 
-/** A browser window of its own, signed in through the sign-in page. Page errors fail the test that opened it. */
-export async function openAs(
+export interface WindowOptions extends Pick<BrowserContextOptions, 'viewport' | 'colorScheme'> {
+  /** The demo account that is signed in; null: nobody. */
+  account?: string | null;
+  /** False: the person refused the camera to this site. */
+  mayUseCamera?: boolean;
+}
+
+export interface OpenWindow {
+  context: BrowserContext;
+  page: Page;
+}
+
+/** A window with cookies and storage of its own. What goes wrong in it is kept for `takePageErrors`. */
+export async function openWindow(
   browser: Browser,
   origin: string,
-  account: string | null,
-  viewport = PHONE,
-): Promise<{ context: BrowserContext; page: Page; errors: string[] }> {
-  const context = await browser.newContext({ baseURL: origin, viewport, permissions: ['camera'] });
+  { account = null, mayUseCamera = true, viewport = PHONE, ...options }: WindowOptions = {},
+): Promise<OpenWindow> {
+  const context = await browser.newContext({
+    baseURL: origin,
+    viewport,
+    reducedMotion: 'reduce',
+    permissions: mayUseCamera ? ['camera'] : [],
+    ...options,
+  });
+  context.setDefaultTimeout(15_000);
   const page = await context.newPage();
-  const errors: string[] = [];
-  page.on('pageerror', (error) => errors.push(String(error)));
-  page.setDefaultTimeout(15_000);
-  if (account) {
-    await page.goto('/sign-in');
-    await page.getByLabel('E-mail').fill(`${account}@${DEMO_DOMAIN}`);
-    await page.getByLabel('Password', { exact: true }).fill(DEMO_PASSWORD);
-    await page.getByRole('button', { name: 'Sign in' }).click();
-    await page.waitForURL((url) => !url.pathname.startsWith('/sign-in'));
-  }
-  return { context, page, errors };
+  watchForErrors(page, account ?? 'guest');
+  if (account) await signIn(context, account);
+  return { context, page };
+}
+
+/** Through the API, so that only the test of the sign-in page pays for that page. */
+async function signIn(context: BrowserContext, account: string): Promise<void> {
+  const answer = await context.request.post('/api/session', {
+    data: { email: `${account}@${DEMO_DOMAIN}`, password: DEMO_PASSWORD },
+  });
+  if (!answer.ok()) throw new Error(`${account} cannot sign in: ${await answer.text()}`);
+}
+
+const pageErrors: string[] = [];
+
+/** The API refuses things as part of its work, and the page shows that in words; Chromium logs it all the same. */
+const REFUSAL = /^Failed to load resource: the server responded with a status of 4\d\d/;
+
+function watchForErrors(page: Page, who: string): void {
+  const note = (what: string): void =>
+    void pageErrors.push(`${who} at ${new URL(page.url()).pathname}: ${what}`);
+  page.on('pageerror', (error) => note(`uncaught ${String(error)}`));
+  // A breach of the content security policy comes as a console error, too
+  page.on('console', (message) => {
+    if (message.type() === 'error' && !REFUSAL.test(message.text())) note(`console: ${message.text()}`);
+  });
+  page.on('response', (response) => {
+    const isRefusal = response.status() < 500 && new URL(response.url()).pathname.startsWith('/api/');
+    if (response.status() >= 400 && !isRefusal) note(`${response.status()} for ${response.url()}`);
+  });
+}
+
+/** What went wrong in any window since the last call: uncaught errors, console errors, files that were not served. */
+export function takePageErrors(): string[] {
+  return pageErrors.splice(0);
 }

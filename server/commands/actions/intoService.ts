@@ -1,5 +1,8 @@
+import { wasSentSinceService } from '../../../shared/domain/lifecycle/needs';
 import { clearingOf, REASON_FACTS } from '../../../shared/domain/lifecycle/reasons';
+import type { SlingAction } from '../../../shared/domain/lifecycle/actions';
 import type { CustodyKind } from '../../../shared/domain/lifecycle/states';
+import type { RatedLoads } from '../../../shared/domain/slings/spec';
 import { InvalidError } from '../../errors';
 import type { FieldError } from '../../../shared/errors';
 import { HoldReasonRow } from '../../models/HoldReasonRow';
@@ -24,8 +27,29 @@ function backInStore(sling: SlingRecord): { kind: CustodyKind; locationId: numbe
     : { kind: sling.custodyKind, locationId: sling.custodyLocationId };
 }
 
+/** The evaluator's lower rated load goes on the record with the act that ends the evaluation. */
+async function takeRatedLoads({
+  context,
+  sling,
+  parts,
+}: Pick<ActionInput<SlingAction>, 'context' | 'sling' | 'parts'>): Promise<{ ratedLoads?: RatedLoads }> {
+  const loads = parts.line?.ratedLoads ?? null;
+  if (!loads) return {};
+  await sling.update(
+    {
+      verticalKg: String(loads.verticalKg),
+      chokerKg: toDecimal(loads.chokerKg),
+      basketKg: toDecimal(loads.basketKg),
+      bridleKg: toDecimal(loads.bridle?.kg),
+      bridleAngleDeg: toDecimal(loads.bridle?.angleDeg),
+    },
+    { transaction: context.transaction },
+  );
+  return { ratedLoads: loads };
+}
+
 export const release: ActionEffect<'release'> = async (input) => {
-  const { context, sling, parts, body } = input;
+  const { context, sling, facts, parts, body } = input;
   checkClearing(input);
   const evidence = await getEvidence(
     context,
@@ -49,11 +73,16 @@ export const release: ActionEffect<'release'> = async (input) => {
     ({ code }) => code === 'makers_tag_missing' || code === 'makers_tag_illegible',
   );
   if (isRetagged) await sling.update({ makersTag: 'legible' }, { transaction: context.transaction });
+  const given = wasSentSinceService(facts) ? await takeRatedLoads(input) : {};
   return appendLedger(context, sling, {
     type: 'release',
     to: 'in_service',
     custody: backInStore(sling),
-    data: { cleared: describeCleared(input, evidence), ...(isRetagged ? { makersTag: 'legible' } : {}) },
+    data: {
+      cleared: describeCleared(input, evidence),
+      ...(isRetagged ? { makersTag: 'legible' } : {}),
+      ...given,
+    },
   });
 };
 
@@ -91,7 +120,8 @@ function describeCleared({ parts, body }: ActionInput<'release'>, evidence: read
   }));
 }
 
-export const returnToService: ActionEffect<'return_to_service'> = async ({ context, sling, parts, body }) => {
+export const returnToService: ActionEffect<'return_to_service'> = async (input) => {
+  const { context, sling, parts, body } = input;
   const closed = parts.openReasons.map(({ id, code }) => ({ reasonId: id, code }));
   await HoldReasonRow.update(
     {
@@ -102,19 +132,7 @@ export const returnToService: ActionEffect<'return_to_service'> = async ({ conte
     },
     { where: { slingId: sling.id, clearedAt: null }, transaction: context.transaction },
   );
-  const lower = parts.line?.ratedLoads ?? null;
-  if (lower) {
-    await sling.update(
-      {
-        verticalKg: String(lower.verticalKg),
-        chokerKg: toDecimal(lower.chokerKg),
-        basketKg: toDecimal(lower.basketKg),
-        bridleKg: toDecimal(lower.bridle?.kg),
-        bridleAngleDeg: toDecimal(lower.bridle?.angleDeg),
-      },
-      { transaction: context.transaction },
-    );
-  }
+  const given = await takeRatedLoads(input);
   return appendLedger(context, sling, {
     type: 'return_to_service',
     to: 'in_service',
@@ -123,7 +141,7 @@ export const returnToService: ActionEffect<'return_to_service'> = async ({ conte
       ...(body.note ? { note: body.note } : {}),
       closed,
       lineId: parts.line?.id ?? null,
-      ...(lower ? { ratedLoads: lower } : {}),
+      ...given,
     },
   });
 };

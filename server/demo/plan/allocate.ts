@@ -44,7 +44,8 @@ export function allocateStories(fleet: readonly DemoSling[], random: Random): Li
     if (free.length === 0) throw new Error(`No ${kind} was there ${ago} days ago.`);
     return random.pick(free);
   };
-  for (const hold of HOLD_CASES) stories.set(take(hold.kind, hold.ago, hold.site), { type: 'held', case: hold });
+  for (const hold of HOLD_CASES)
+    stories.set(take(hold.kind, hold.ago, hold.site), { type: 'held', case: hold });
   for (const other of OTHER_CASES) {
     const ago = other.then === 'found' ? other.lostAgo : other.ago;
     stories.set(take(other.kind, ago), { type: 'other', case: other });

@@ -48,7 +48,13 @@ const destroyed = (
   after: number,
   destroyedAfter: number,
 ): HoldCase => ({ ago, kind, cause, then: 'destroyed', after, destroyedAfter });
-const shipped = (ago: number, kind: SlingKind, cause: CauseId, shipment: ShipmentId, site: DemoSite): HoldCase => ({
+const shipped = (
+  ago: number,
+  kind: SlingKind,
+  cause: CauseId,
+  shipment: ShipmentId,
+  site: DemoSite,
+): HoldCase => ({
   ago,
   kind,
   cause,
@@ -119,13 +125,37 @@ const DESTROYED: readonly HoldCase[] = [
 
 const RELEASED: readonly HoldCase[] = [
   released(288, 'alloy-chain', 'chain-latch', 3, 'Latch kit of the maker fitted, closes and holds.'),
-  released(251, 'wire-rope', 'rope-suspect', 2, 'Only grease and one bright wire; counted again over the whole length.'),
+  released(
+    251,
+    'wire-rope',
+    'rope-suspect',
+    2,
+    'Only grease and one bright wire; counted again over the whole length.',
+  ),
   released(223, 'synthetic-web', 'web-report', 4, 'Paint, no cut: washed, both faces looked at.'),
-  released(197, 'alloy-chain', 'chain-overload', 6, 'Every link gauged, no stretch, hooks within their throat.'),
-  released(163, 'synthetic-round', 'round-cover', 5, 'Cover scuffed through its outer layer only, core felt and sound.'),
+  released(
+    197,
+    'alloy-chain',
+    'chain-overload',
+    6,
+    'Every link gauged, no stretch, hooks within their throat.',
+  ),
+  released(
+    163,
+    'synthetic-round',
+    'round-cover',
+    5,
+    'Cover scuffed through its outer layer only, core felt and sound.',
+  ),
   released(134, 'alloy-chain', 'chain-tag', 9, 'Tarn Forge tagged it again; the new tag is in the photo.'),
   released(101, 'synthetic-round', 'round-report', 2, 'A stain of hydraulic oil, washed out.'),
-  released(76, 'wire-rope', 'record-doubt', 3, 'Number and ferrule mark compared with the certificate: the record is right.'),
+  released(
+    76,
+    'wire-rope',
+    'record-doubt',
+    3,
+    'Number and ferrule mark compared with the certificate: the record is right.',
+  ),
   released(52, 'alloy-chain', 'chain-latch', 2, 'Latch kit of the maker fitted.'),
 ];
 
@@ -164,13 +194,40 @@ export type OtherCase = { kind: SlingKind; ago: number } & (
 );
 
 export const OTHER_CASES: readonly OtherCase[] = [
-  { kind: 'synthetic-web', ago: 310, then: 'lost', note: 'Not back from the jacket lift; crew and deck searched twice.' },
+  {
+    kind: 'synthetic-web',
+    ago: 310,
+    then: 'lost',
+    note: 'Not back from the jacket lift; crew and deck searched twice.',
+  },
   { kind: 'wire-rope', ago: 182, then: 'lost', note: 'Went over the quay side with the old spreader.' },
-  { kind: 'synthetic-round', ago: 74, then: 'lost', note: 'Left on a barge that sailed; the agent has not seen it.' },
-  { kind: 'synthetic-web', ago: 19, then: 'lost', note: 'Missing at the count of Rack B, nobody signed it out.' },
+  {
+    kind: 'synthetic-round',
+    ago: 74,
+    then: 'lost',
+    note: 'Left on a barge that sailed; the agent has not seen it.',
+  },
+  {
+    kind: 'synthetic-web',
+    ago: 19,
+    then: 'lost',
+    note: 'Missing at the count of Rack B, nobody signed it out.',
+  },
   { kind: 'wire-rope', ago: 118, then: 'found', lostAgo: 160, note: 'Lay behind the blade racks.' },
-  { kind: 'alloy-chain', ago: 240, then: 'departed', cause: 'sold', note: 'Sold with the old spreader frame.' },
-  { kind: 'synthetic-web', ago: 88, then: 'departed', cause: 'transferred_out', note: 'To the pre-assembly yard upriver.' },
+  {
+    kind: 'alloy-chain',
+    ago: 240,
+    then: 'departed',
+    cause: 'sold',
+    note: 'Sold with the old spreader frame.',
+  },
+  {
+    kind: 'synthetic-web',
+    ago: 88,
+    then: 'departed',
+    cause: 'transferred_out',
+    note: 'To the pre-assembly yard upriver.',
+  },
   { kind: 'alloy-chain', ago: 205, then: 'relabelled', reason: 'illegible' },
   { kind: 'synthetic-web', ago: 143, then: 'relabelled', reason: 'lost' },
   { kind: 'wire-rope', ago: 110, then: 'relabelled', reason: 'illegible' },

@@ -67,7 +67,11 @@ export const CAUSES = {
     'rustyRope',
   ),
   'rope-suspect': hold('damage_suspected', 'Broken wires near the ferrule.', 'brokenWires'),
-  'rope-report': report('Jory, tower crew', 'Wires sticking out, one of them went through my glove.', 'brokenWires'),
+  'rope-report': report(
+    'Jory, tower crew',
+    'Wires sticking out, one of them went through my glove.',
+    'brokenWires',
+  ),
   'mesh-broken': inspection(
     'periodic',
     'mesh.broken_weld_or_wire',
@@ -75,7 +79,12 @@ export const CAUSES = {
     'openMesh',
   ),
   'mesh-stiff': inspection('frequent', 'mesh.stiff', 'Does not roll over its middle third.', null),
-  'web-cut': inspection('frequent', 'web.cut_hole_tear', 'Cut from the edge, a third of the width.', 'cutWeb'),
+  'web-cut': inspection(
+    'frequent',
+    'web.cut_hole_tear',
+    'Cut from the edge, a third of the width.',
+    'cutWeb',
+  ),
   'web-stitching': inspection(
     'periodic',
     'web.stitching',
@@ -83,7 +92,11 @@ export const CAUSES = {
     'openStitching',
   ),
   'web-chemical': hold('heat_or_chemical', 'Lay in a spill of blade cleaner, stiff where it dried.', null),
-  'web-report': report('Hanne, blade crew', 'The edge looks cut where it went round the root ring.', 'cutWeb'),
+  'web-report': report(
+    'Hanne, blade crew',
+    'The edge looks cut where it went round the root ring.',
+    'cutWeb',
+  ),
   'round-core': inspection(
     'periodic',
     'round.core_exposed',
@@ -98,7 +111,12 @@ export const CAUSES = {
   ),
   'round-report': report('Tomasz, nacelle crew', 'A dark wet patch, smells of oil.', null),
   'fibre-cut': inspection('frequent', 'fibre.cut_break', 'One strand cut half through.', 'frayedRope'),
-  'fibre-powder': inspection('periodic', 'fibre.powder', 'Powder falls out when the strands are opened.', null),
+  'fibre-powder': inspection(
+    'periodic',
+    'fibre.powder',
+    'Powder falls out when the strands are opened.',
+    null,
+  ),
   'record-doubt': hold(
     'record_in_doubt',
     'The mark on the ferrule and the number in the record do not seem to go together.',

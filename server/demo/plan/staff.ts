@@ -1,11 +1,6 @@
 /** The accounts of the demo that act in its history. */
 export type DemoAccount =
-  | 'storekeeper'
-  | 'storekeeper2'
-  | 'inspector'
-  | 'inspector2'
-  | 'manager'
-  | 'manager2';
+  'storekeeper' | 'storekeeper2' | 'inspector' | 'inspector2' | 'manager' | 'manager2';
 
 export type DemoSite = 'slipStore' | 'bladeHall';
 

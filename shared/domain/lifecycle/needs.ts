@@ -71,11 +71,12 @@ function isPassingRelease(inspection: InspectionFact): boolean {
   return inspection.type === 'release' && inspection.verdict === 'pass' && inspection.isComplete;
 }
 
-const releaseInspection: Need = ({ openReasons, inspections }, actor) => {
-  const lastReason = Math.max(0, ...openReasons.map((reason) => reason.placedSeq));
+const releaseInspection: Need = ({ openReasons, inspections, cameBackSeq }, actor) => {
+  // A condemned sling comes back without a new reason: what was seen before it was sent counts no more.
+  const after = Math.max(cameBackSeq ?? 0, ...openReasons.map((reason) => reason.placedSeq));
   const passed = inspections.some(
     (inspection) =>
-      isPassingRelease(inspection) && inspection.inspectorId === actor.id && inspection.seq > lastReason,
+      isPassingRelease(inspection) && inspection.inspectorId === actor.id && inspection.seq > after,
   );
   return unless(
     passed,
@@ -226,14 +227,17 @@ const tagUnlessRetagged: Need = (facts, actor) =>
     ? null
     : makersTag(facts, actor);
 
+export function wasSentSinceService({ lastSentSeq, lastInServiceSeq }: LifecycleFacts): boolean {
+  return lastSentSeq !== null && lastSentSeq > (lastInServiceSeq ?? 0);
+}
+
 /** All that `release` needs: more, when the sling was never accepted or was sent since it was last in service. */
 export function releaseNeeds(facts: LifecycleFacts): readonly Need[] {
-  const wasSent = facts.lastSentSeq !== null && facts.lastSentSeq > (facts.lastInServiceSeq ?? 0);
   return [
     ...alwaysForRelease,
     tagUnlessRetagged,
     ...(facts.lastInServiceSeq === null ? [initialInspection, ratedLoad, certificate] : []),
-    ...(wasSent ? returnEvidence : []),
+    ...(wasSentSinceService(facts) ? returnEvidence : []),
   ];
 }
 

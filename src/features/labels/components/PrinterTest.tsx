@@ -38,24 +38,23 @@ export function PrinterTest(): ReactNode {
       <Panel title="How to read it">
         <ol className="flex list-decimal flex-col gap-2.5 pl-6">
           <li>
-            Print the page on the stock itself, at actual size (100 %), with the darkness you print labels
-            with.
+            Print it on the stock itself, at actual size (100 %), as dark and as fast as labels are printed.
           </li>
           <li>
-            Measure the ruler on the page. If it is off, the printer scales: switch “fit to page” off and
-            print again.
+            Measure the largest code: its size stands beside it. If they differ, the printer scales: switch
+            “fit to page” off and print again.
           </li>
           <li>
-            Scan the codes from the largest to the smallest with the phone that will be used, at arm’s length,
-            once straight and once slanted.
+            Scan the codes from the largest down, each a hand’s width before the phone that will be used,
+            three times running.
           </li>
           <li>
-            The smallest one that reads at once every time is the limit of this printer. Take a stock whose
-            code is at least one step larger: dirt and wear take the rest.
+            The smallest one that reads at once three times is the smallest this printer can do. Take a stock
+            whose code is that size or, better, larger: dirt and wear take the rest.
           </li>
           <li>
-            If none reads, or only the largest: the black runs (less darkness or speed), or the head is dirty
-            (clean it with alcohol).
+            If none reads, or only the largest: the black runs (print lighter or slower), or the head is dirty
+            (clean it as its maker says).
           </li>
         </ol>
         <p className="mt-3 text-muted">

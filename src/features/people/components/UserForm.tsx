@@ -1,5 +1,5 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import type { ReactNode } from 'react';
+import { useState, type ReactNode } from 'react';
 import { ROLE_NAMES, ROLES } from '../../../../shared/domain/access/roles';
 import { createUserRequest, type CreateUserRequest } from '../../../../shared/schemas/people';
 import type { Site } from '../../../../shared/schemas/places';
@@ -7,7 +7,7 @@ import { LIMITS } from '../../../../shared/limits';
 import { ActionBar } from '../../../components/ui/ActionBar';
 import { Button } from '../../../components/ui/Button';
 import { DateField, TextField } from '../../../components/ui/inputs';
-import { ProblemNotice } from '../../../components/ui/Notice';
+import { Notice, ProblemNotice } from '../../../components/ui/Notice';
 import { Panel } from '../../../components/ui/Panel';
 import { ChoiceTiles } from '../../../components/ui/Tiles';
 import { useFormDraft } from '../../../lib/useFormDraft';
@@ -33,7 +33,8 @@ export function UserForm(props: UserFormProps): ReactNode {
     resolver: zodResolver(createUserRequest),
     defaultValues: initial,
   });
-  const { register, watch, setValue, handleSubmit, formState, clearDraft } = form;
+  const { register, watch, setValue, handleSubmit, formState, clearDraft, reset, wasRestored } = form;
+  const [isDraftShown, setDraftShown] = useState(wasRestored);
   const { errors } = formState;
   const roles = watch('roles');
   const siteIds = watch('siteIds');
@@ -46,6 +47,24 @@ export function UserForm(props: UserFormProps): ReactNode {
       className="grid gap-8 lg:grid-cols-2 lg:gap-x-12"
       onSubmit={(event) => void submit(event)}
     >
+      {isDraftShown && (
+        <Notice
+          className="lg:col-span-2"
+          title="Changes that were not saved are shown"
+          action={
+            <Button
+              tone="quiet"
+              onClick={() => {
+                reset(initial);
+                clearDraft();
+                setDraftShown(false);
+              }}
+            >
+              Start over
+            </Button>
+          }
+        />
+      )}
       <Panel title="Person">
         <div className="flex flex-col gap-4">
           <TextField

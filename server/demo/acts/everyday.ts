@@ -1,0 +1,87 @@
+import type { Random } from '../random';
+import { confirm, accept, label, register } from './begin';
+import { inspect } from './inspect';
+import type { Script } from './script';
+
+/** A periodic inspection is made so many days after the last one: before a year is over. */
+const PERIOD_DAYS = 350;
+const YEAR_DAYS = 365;
+/** A sling's next due date lies at least so far ahead unless its story says otherwise: not "due soon". */
+const LEAST_DUE_IN = 35;
+const FREQUENT_COUNT = { normal: 0.08, severe: 2, special: 2 };
+
+/** Registered the day it came, labelled, confirmed, inspected and accepted the day after. The first of a lot prints for all. */
+export function playBeginning({ sling, clock, keeper, inspector, add }: Script): void {
+  const { lot, place } = sling;
+  const { receivedAgo, arrival } = lot;
+  add(clock.at(receivedAgo, 8, 2 * place), keeper, (context, world) => register(context, world, sling));
+  if (arrival === 'unlabelled') return;
+  if (place === 0) {
+    add(clock.at(receivedAgo, 11), keeper, (context, world) =>
+      label(
+        context,
+        world,
+        [...world.records.keys()].filter((other) => other.lot === lot),
+      ),
+    );
+  }
+  if (arrival === 'printed') return;
+  add(clock.at(receivedAgo, 13, 3 * place), keeper, (context, world) => confirm(context, world, sling));
+  add(clock.at(receivedAgo - 1, 9, 7 * place), inspector, (context, world) =>
+    inspect(context, world, sling, 'initial'),
+  );
+  if (arrival === 'inspected') return;
+  add(clock.at(receivedAgo - 1, 9, 7 * place + 5), inspector, (context, world) =>
+    accept(context, world, sling),
+  );
+}
+
+/** The inspections of a sling in service until `untilAgo`, none of them late. */
+export function playInspections(script: Script, random: Random, untilAgo: number): void {
+  const firstAgo = script.sling.lot.receivedAgo - 1;
+  const periodic: number[] = [];
+  for (let ago = firstAgo - PERIOD_DAYS; ago > untilAgo; ago -= PERIOD_DAYS) periodic.push(ago);
+  addInspections(script, periodic, random, untilAgo);
+}
+
+/**
+ * The inspections of a sling in service to this day.
+ * @param nextDueIn days until the next one is due, negative when it is overdue; null when that is left to chance
+ */
+export function playInspectionsToDate(script: Script, random: Random, nextDueIn: number | null): void {
+  const firstAgo = script.sling.lot.receivedAgo - 1;
+  if (nextDueIn === null && YEAR_DAYS - firstAgo >= LEAST_DUE_IN) {
+    addInspections(script, [], random, 1);
+    return;
+  }
+  const latestAgo = Math.min(YEAR_DAYS - LEAST_DUE_IN, firstAgo - 20);
+  const lastAgo = nextDueIn === null ? random.int(10, latestAgo) : YEAR_DAYS - nextDueIn;
+  const steps = Math.ceil((firstAgo - lastAgo) / PERIOD_DAYS);
+  const periodic = Array.from({ length: steps }, (_, index) =>
+    Math.round(firstAgo - ((firstAgo - lastAgo) * (index + 1)) / steps),
+  );
+  addInspections(script, periodic, random, 1);
+}
+
+function addInspections(
+  { sling, clock, inspector, secondInspector, add }: Script,
+  periodic: readonly number[],
+  random: Random,
+  untilAgo: number,
+): void {
+  const { receivedAgo, serviceClass } = sling.lot;
+  for (const ago of periodic) {
+    const by = random.pick([inspector, secondInspector]);
+    add(clock.at(ago, random.int(8, 14), random.int(0, 59)), by, (context, world) =>
+      inspect(context, world, sling, 'periodic'),
+    );
+  }
+  const wanted = FREQUENT_COUNT[serviceClass];
+  const count = Math.floor(wanted) + (random.next() < wanted % 1 ? 1 : 0);
+  for (let made = 0; made < count && receivedAgo - 5 > untilAgo; made++) {
+    const ago = random.int(untilAgo + 1, receivedAgo - 4);
+    add(clock.at(ago, 15, random.int(0, 59)), inspector, (context, world) =>
+      inspect(context, world, sling, 'frequent'),
+    );
+  }
+}

@@ -1,0 +1,62 @@
+import type { Transaction } from 'sequelize';
+import type { SessionUser } from '../../../shared/schemas/people';
+import type { ActorContext, Services } from '../../context';
+import type { DemoClock } from '../clock';
+import type { PictureName } from '../evidence/pictures';
+import type { DemoSling } from '../plan/fleet';
+import type { EVALUATORS } from '../plan/shipments';
+import type { DemoAccount, DemoSite } from '../plan/staff';
+import type { Random } from '../random';
+
+export interface SitePlaces {
+  id: number;
+  racks: readonly number[];
+  cages: readonly number[];
+  lookOver: number;
+}
+
+/** Everything that the acts of the story need, and what they leave behind for later ones. */
+export interface World extends Omit<Services, 'now'> {
+  transaction: Transaction;
+  clock: DemoClock;
+  /** For what is drawn while the story runs, such as tag codes. */
+  random: Random;
+  people: ReadonlyMap<DemoAccount, SessionUser>;
+  places: Record<DemoSite, SitePlaces>;
+  evaluators: Record<keyof typeof EVALUATORS, number>;
+  pictures: ReadonlyMap<PictureName, string>;
+  /** The record of a sling once it is registered, and its last label's code. */
+  records: Map<DemoSling, SlingTrace>;
+}
+
+export interface SlingTrace {
+  id: number;
+  /** Serial or number, as it stands on the sling. */
+  identity: string;
+  code: string | null;
+}
+
+/** One thing that one person did at one moment. */
+export interface Act {
+  at: Date;
+  by: DemoAccount;
+  run: (context: ActorContext, world: World) => Promise<unknown>;
+}
+
+export function getPerson(world: Pick<World, 'people'>, account: DemoAccount): SessionUser {
+  const person = world.people.get(account);
+  if (!person) throw new Error(`The demo has no ${account}.`);
+  return person;
+}
+
+export function getTrace(world: Pick<World, 'records'>, sling: DemoSling): SlingTrace {
+  const trace = world.records.get(sling);
+  if (!trace) throw new Error(`${sling.number} is not registered yet.`);
+  return trace;
+}
+
+export function getPicture(world: Pick<World, 'pictures'>, name: PictureName): string {
+  const id = world.pictures.get(name);
+  if (id === undefined) throw new Error(`There is no picture ${name}.`);
+  return id;
+}
