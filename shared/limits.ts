@@ -9,7 +9,9 @@ export const LIMITS = {
   legs: { min: 1, max: 4 },
   /** The heaviest rated load taken, kg: far above any sling in the published tables. */
   loadKg: 1_000_000,
-  lengthMm: 1_000_000,
+  lengthMm: 999_999,
+  /** The least load (kg) and length (mm) taken: less would be kept as nothing. */
+  least: 0.01,
   fittings: 24,
   photosPerAct: 12,
   labelsPerRun: 1000,

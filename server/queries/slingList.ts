@@ -104,6 +104,8 @@ async function addDueFilter(
 /** How many finds of each kind a search looks at: whoever finds more types another character. */
 const SEARCH_LIMIT = 1000;
 
+const WORD_COLUMNS = 'number, maker_serial, stock_number, lot, maker';
+
 /** By the beginning of number, serial or lot, by whole words in any of them, or by tag code. */
 function addSearch(where: Where, q: string | undefined): void {
   const text = q?.trim();
@@ -113,12 +115,19 @@ function addSearch(where: Where, q: string | undefined): void {
     (column) => `(SELECT id FROM slings WHERE ${column} LIKE ? LIMIT ${SEARCH_LIMIT})`,
   );
   where.values.push(prefix, prefix, prefix, prefix);
-  const words = text.match(/[\p{L}\p{N}]{3,}/gu);
-  if (words) {
+  const words = text.match(/[\p{L}\p{N}]+/gu) ?? [];
+  const long = words.filter((word) => word.length >= 3);
+  if (long.length > 0) {
+    // The index holds no word under three letters: those are looked for in what it finds.
+    const short = words.filter((word) => word.length < 3);
+    const begins = short.map(() => ` AND CONCAT_WS(' ', ${WORD_COLUMNS}) REGEXP ?`).join('');
     parts.push(
-      `(SELECT id FROM slings WHERE MATCH (number, maker_serial, stock_number, lot, maker) AGAINST (? IN BOOLEAN MODE) LIMIT ${SEARCH_LIMIT})`,
+      `(SELECT id FROM slings WHERE MATCH (${WORD_COLUMNS}) AGAINST (? IN BOOLEAN MODE)${begins} LIMIT ${SEARCH_LIMIT})`,
     );
-    where.values.push(words.map((word) => `+${word}*`).join(' '));
+    where.values.push(
+      long.map((word) => `+${word}*`).join(' '),
+      ...short.map((word) => `(^|[^\\p{L}\\p{N}])${word}`),
+    );
   }
   const code = text
     .toUpperCase()

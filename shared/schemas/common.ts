@@ -30,7 +30,8 @@ export const fileIdSchema = z.uuid();
 export const dateSchema = z
   .string()
   .regex(/^\d{4}-\d{2}-\d{2}$/, 'A date as YYYY-MM-DD.')
-  .refine(isRealDate, 'This day does not exist.');
+  .refine(isRealDate, 'This day does not exist.')
+  .refine((value) => value >= '1900', 'No sling is that old: check the year.');
 
 function isRealDate(value: string): boolean {
   const date = new Date(`${value}T00:00:00Z`);
@@ -41,11 +42,11 @@ export const instantSchema = z.iso.datetime();
 
 export const loadKgSchema = z
   .number()
-  .positive('More than zero.')
+  .min(LIMITS.least, 'More than zero.')
   .max(LIMITS.loadKg, 'Far above any sling: check the unit.');
 export const lengthMmSchema = z
   .number()
-  .positive('More than zero.')
+  .min(LIMITS.least, 'More than zero.')
   .max(LIMITS.lengthMm, 'Far longer than any sling: check the unit.');
 
 export const pageQuery = z.strictObject({

@@ -66,7 +66,8 @@ export function listUnmetNeeds(action: SlingAction, facts: LifecycleFacts, actor
 /** Is the action open to this person on this sling and, if not, why not: state, role, same person, needs. */
 export function answerAction(action: SlingAction, facts: LifecycleFacts, actor: Actor): ActionAnswer {
   if (!isInTable(action, facts.state, facts.condemned)) {
-    const state = facts.condemned ? 'condemned' : STATE_FACTS[facts.state].word.toLowerCase();
+    const state =
+      facts.condemned && facts.state === 'held' ? 'condemned' : STATE_FACTS[facts.state].word.toLowerCase();
     return {
       action,
       open: false,

@@ -19,7 +19,7 @@ export function listMayNotUse(facts: UseFacts, today: string): Unmet[] {
   add(
     facts.state !== 'in_service',
     'state',
-    facts.condemned
+    facts.condemned && facts.state === 'held'
       ? 'It is condemned.'
       : `It is ${STATE_FACTS[facts.state].word.toLowerCase()}, not in service.`,
   );

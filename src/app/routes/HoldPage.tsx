@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { useParams, useSearchParams } from 'react-router-dom';
+import type { HoldReason } from '../../../shared/domain/lifecycle/reasons';
 import type { Sling } from '../../../shared/schemas/slings';
 import { PageHeader } from '../../components/ui/PageHeader';
 import { ErrorState, SkeletonLines } from '../../components/ui/states';
@@ -7,6 +8,7 @@ import { showToast } from '../../components/ui/Toast';
 import { paths } from '../../config/paths';
 import { HeldConfirmation } from '../../features/actions/components/HeldConfirmation';
 import { HoldForm } from '../../features/actions/components/HoldForm';
+import { QuickHold } from '../../features/actions/components/QuickHold';
 import { NotOpen } from '../../features/actions/components/NotOpen';
 import { SlingLine } from '../../features/actions/components/SlingLine';
 import { isChoosable } from '../../features/actions/holdDraft';
@@ -14,7 +16,7 @@ import { useSling } from '../../features/slings/api/getSling';
 import { useLocations } from '../../features/slings/api/places';
 import { useKeepSling } from '../../features/slings/hooks/useKeepSling';
 
-/** `?reason=` arms a tile; `?held` shows the confirmation, so that a reload doesn't ask to hold again. */
+/** `?more` asks for several reasons (`?reason=` arms one); `?held` shows the confirmation, also after a reload. */
 export function Component(): ReactNode {
   const id = Number(useParams().id);
   const [search, setSearch] = useSearchParams();
@@ -48,6 +50,8 @@ export function Component(): ReactNode {
         sling={sling}
         isHeldNow={isHeldNow}
         armedReason={isChoosable(reason) ? reason : null}
+        isMore={search.has('more') || isChoosable(reason)}
+        onMore={(code) => setSearch(code ? { more: '', reason: code } : { more: '' })}
         onHeld={() => setSearch({ held: '' }, { replace: true })}
         onReload={query.refetch}
       />
@@ -59,10 +63,14 @@ function HoldSteps({
   sling,
   isHeldNow,
   armedReason,
+  isMore,
+  onMore,
   onHeld,
   onReload,
 }: Pick<Parameters<typeof HoldForm>[0], 'sling' | 'armedReason'> & {
   isHeldNow: boolean;
+  isMore: boolean;
+  onMore: (reason: HoldReason | null) => void;
   onHeld: () => void;
   onReload: () => Promise<unknown>;
 }): ReactNode {
@@ -95,7 +103,11 @@ function HoldSteps({
   return (
     <>
       <SlingLine sling={sling} />
-      <HoldForm sling={sling} armedReason={armedReason} onHeld={keepThen(onHeld)} />
+      {isMore ? (
+        <HoldForm sling={sling} armedReason={armedReason} onHeld={keepThen(onHeld)} />
+      ) : (
+        <QuickHold sling={sling} onHeld={keepThen(onHeld)} onMore={onMore} />
+      )}
     </>
   );
 }

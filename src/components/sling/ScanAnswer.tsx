@@ -17,7 +17,10 @@ export interface ScanAnswerProps {
 export function ScanAnswer({ mayUse, title, lines = [], action }: ScanAnswerProps): ReactNode {
   const look = mayUse ? STATE_LOOKS.in_service : DO_NOT_USE_LOOK;
   const ref = useRef<HTMLElement>(null);
-  useEffect(() => ref.current?.scrollIntoView({ block: 'start' }), []);
+  useEffect(() => {
+    // Newer browsers answer a promise, which must not become the effect's clean-up
+    ref.current?.scrollIntoView({ block: 'start' });
+  }, []);
   return (
     <section
       ref={ref}

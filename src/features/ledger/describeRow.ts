@@ -1,11 +1,15 @@
 import { z } from 'zod';
 import { EVENT_NAMES } from '../../../shared/domain/lifecycle/events';
+import { EVALUATION_OUTCOMES, type EvaluationOutcome } from '../../../shared/domain/lifecycle/facts';
+import { INSPECTION_TYPE_FACTS, INSPECTION_TYPES } from '../../../shared/domain/inspection/inspectionTypes';
+import { CERTIFICATE_BASES, CERTIFICATE_BASIS_NAMES } from '../../../shared/domain/slings/kinds';
 import { HOLD_REASONS, REASON_FACTS } from '../../../shared/domain/lifecycle/reasons';
 import { CUSTODY_NAMES, STATE_FACTS } from '../../../shared/domain/lifecycle/states';
 import { DEPART_CAUSE_NAMES, DEPART_CAUSES } from '../../../shared/schemas/actions';
 import { REPRINT_REASON_FACTS, REPRINT_REASONS } from '../../../shared/schemas/labels';
 import type { LedgerRow } from '../../../shared/schemas/ledger';
 import { formatTagCode } from '../../lib/format';
+import { describeCorrection, describeEdit } from './describeChanges';
 
 const reasonSchema = z.object({ code: z.enum(HOLD_REASONS), note: z.string().optional() });
 /** What a reader of the ledger wants in words; rows keep more, which the hashes cover. Each part is read for itself. */
@@ -20,7 +24,13 @@ const PARTS = {
   code: z.string(),
   cause: z.enum(DEPART_CAUSES),
   verdict: z.enum(['pass', 'refer', 'reject']),
-  outcome: z.string(),
+  outcome: z.enum(EVALUATION_OUTCOMES),
+  evaluator: z.string(),
+  inspection: z.enum(INSPECTION_TYPES),
+  findings: z.array(z.object({ message: z.string() })),
+  stricter: z.object({ note: z.string() }),
+  certificate: z.object({ basis: z.enum(CERTIFICATE_BASES), number: z.string() }),
+  replaces: z.string(),
 } as const;
 type Parts = { [Name in keyof typeof PARTS]?: z.infer<(typeof PARTS)[Name]> };
 
@@ -29,6 +39,14 @@ const VERDICT_WORDS = {
   refer: 'Referred to a qualified person.',
   reject: 'Rejected.',
 } as const;
+
+const OUTCOME_WORDS = {
+  fit: 'The evaluator calls it fit.',
+  repaired: 'The evaluator repaired it.',
+  unfit: 'The evaluator calls it unfit.',
+  not_examined: 'The evaluator did not examine it.',
+  destroyed: 'The evaluator destroyed it.',
+} as const satisfies Record<EvaluationOutcome, string>;
 
 /** The row's act in one line. */
 export function nameRow({ type }: Pick<LedgerRow, 'type'>): string {
@@ -41,7 +59,15 @@ export function describeRow(row: LedgerRow, locationName: (id: number) => string
   const parts = readParts(row.data);
   return [
     describeMove(row),
+    parts.inspection && INSPECTION_TYPE_FACTS[parts.inspection].name,
     parts.verdict && VERDICT_WORDS[parts.verdict],
+    ...(parts.findings ?? []).map(({ message }) => message),
+    parts.stricter && `Stricter than the rules: ${parts.stricter.note}`,
+    ...(row.type === 'corrected' ? describeCorrection(row.data.before, row.data.after) : []),
+    row.type === 'edited' ? describeEdit(row.data.changes) : null,
+    parts.certificate && `${CERTIFICATE_BASIS_NAMES[parts.certificate.basis]}, ${parts.certificate.number}`,
+    parts.evaluator && `To ${parts.evaluator}`,
+    parts.outcome && OUTCOME_WORDS[parts.outcome],
     ...(parts.reasons ?? []).map(describeReason),
     ...(parts.cleared ?? []).map((reason) => `Cleared: ${describeReason(reason)}`),
     ...(parts.closed ?? []).map((reason) => `Closed: ${describeReason(reason)}`),
@@ -50,6 +76,7 @@ export function describeRow(row: LedgerRow, locationName: (id: number) => string
     parts.reason && describeReprint(parts.reason),
     parts.note,
     parts.code && `Label ${formatTagCode(parts.code)}`,
+    parts.replaces && `In place of ${formatTagCode(parts.replaces)}`,
     describePlace(row, parts.location, locationName),
   ].flatMap((line) => (line ? [line] : []));
 }

@@ -57,6 +57,9 @@ export function HeldConfirmation({
         <LinkButton to={paths.sling(sling.id)} tone="quiet">
           Open the record
         </LinkButton>
+        <LinkButton to={`${paths.hold(sling.id)}?more`} tone="quiet">
+          Add a reason
+        </LinkButton>
         <LinkButton to={paths.scan()} tone="quiet">
           Scan the next sling
         </LinkButton>

@@ -27,7 +27,7 @@ export interface HoldFormProps {
   onHeld: (answer: ActionResponse) => void;
 }
 
-/** Two taps: why, and Hold. Nothing else is asked; a photo may come before or after. */
+/** Several reasons, words for one that says nothing by itself, a photo before the hold. */
 export function HoldForm({ sling, armedReason, onHeld }: HoldFormProps): ReactNode {
   const act = useAct(sling, 'hold');
   const { values, update, clear } = useLiveDraft(`hold.${sling.id}`, holdDraftSchema, {

@@ -48,6 +48,53 @@ describe('describeRow', () => {
     expect(describeRow({ ...secured, data: { location: 'Cage 9' } }, noName)).toEqual(['In Cage 9']);
   });
 
+  it('tells what a correction changed, from and to, and leaves out what stayed', () => {
+    const corrected: LedgerRow = {
+      ...ROW,
+      type: 'corrected',
+      from: 'held',
+      data: {
+        before: { makerSerial: 'TF-88203', ratedLoads: { verticalKg: 3150, chokerKg: 2520 } },
+        after: {
+          makerSerial: 'TF-88230',
+          ratedLoads: { verticalKg: 3000, chokerKg: 2520, bridle: { kg: 5100, angleDeg: 60 } },
+        },
+        reason: 'Misread.',
+      },
+    };
+    expect(describeRow(corrected, noName)).toEqual([
+      'Maker’s serial: TF-88203 → TF-88230',
+      'Rated load, vertical: 3,150 kg → 3,000 kg',
+      'Rated load, bridle: none → 5,100 kg',
+      'Bridle angle: none → 60°',
+      'Misread.',
+    ]);
+  });
+
+  it('names what an edit touched without repeating its texts', () => {
+    const edited: LedgerRow = {
+      ...ROW,
+      type: 'edited',
+      from: 'held',
+      data: { changes: { notes: 'x', homeLocationId: null } },
+    };
+    expect(describeRow(edited, noName)).toEqual(['Notes, Home location']);
+  });
+
+  it('tells an inspection by its type, verdict and findings', () => {
+    const inspected: LedgerRow = {
+      ...ROW,
+      type: 'inspected',
+      from: 'held',
+      data: { inspection: 'release', verdict: 'reject', findings: [{ message: 'Chain worn to 8.5 mm' }] },
+    };
+    expect(describeRow(inspected, noName)).toEqual([
+      'Release inspection',
+      'Rejected.',
+      'Chain worn to 8.5 mm',
+    ]);
+  });
+
   it('shows an act and data that it does not know without failing', () => {
     const strange: LedgerRow = {
       ...ROW,

@@ -1,6 +1,5 @@
 import type { ReactNode } from 'react';
 import { LIMITS } from '../../../../../shared/limits';
-import { ActionBar } from '../../../../components/ui/ActionBar';
 import { Button, LinkButton } from '../../../../components/ui/Button';
 import { paths } from '../../../../config/paths';
 import { formatCount } from '../../../../lib/format';
@@ -10,17 +9,15 @@ export function PickBar({ ids, onClear }: { ids: ReadonlySet<number>; onClear: (
   if (ids.size === 0) return null;
   const isTooMany = ids.size > LIMITS.labelsPerRun;
   return (
-    <div className="lg:sticky lg:bottom-0 lg:z-20 lg:border-t lg:border-rule lg:bg-paper lg:py-3">
-      <ActionBar>
-        {isTooMany ? (
-          <p>{LIMITS.labelsPerRun.toLocaleString('en-GB')} labels are the most for one run.</p>
-        ) : (
-          <LinkButton to={paths.labelsFor([...ids])}>Print {formatCount(ids.size, 'label')}</LinkButton>
-        )}
-        <Button tone="quiet" onClick={onClear}>
-          Choose none
-        </Button>
-      </ActionBar>
+    <div className="no-print sticky bottom-24 z-20 -mx-4 mt-4 flex flex-wrap items-center gap-3 border-y border-rule bg-paper px-4 py-3 *:flex-1 sm:-mx-6 sm:px-6 lg:bottom-0 lg:mx-0 lg:px-0 lg:*:flex-none">
+      {isTooMany ? (
+        <p>{LIMITS.labelsPerRun.toLocaleString('en-GB')} labels are the most for one run.</p>
+      ) : (
+        <LinkButton to={paths.labelsFor([...ids])}>Print {formatCount(ids.size, 'label')}</LinkButton>
+      )}
+      <Button tone="quiet" onClick={onClear}>
+        Choose none
+      </Button>
     </div>
   );
 }

@@ -1,0 +1,342 @@
+import { createHash, randomBytes } from 'node:crypto';
+import http from 'node:http';
+import type { AddressInfo } from 'node:net';
+import { deflateSync } from 'node:zlib';
+import PDFDocument from 'pdfkit';
+import sharp from 'sharp';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { LIMITS } from '../../shared/limits';
+import type { StoredFile } from '../../shared/schemas/files';
+import { countRows, expectProblem, findProblemFault, openSecondApp } from '../support/requests';
+import { openTestStore, type TestStore } from '../support/testStore';
+import { expectStatus, openWork, type Work } from '../support/work';
+
+let store: TestStore;
+let work: Work;
+beforeAll(async () => {
+  store = await openTestStore();
+  work = await openWork(store);
+});
+afterAll(() => store.close());
+
+const hash = (bytes: Buffer): string => createHash('sha256').update(bytes).digest('hex');
+const upload = async (bytes: Buffer, filename: string, contentType?: string) =>
+  (await store.signIn('storekeeper'))
+    .post('/api/files')
+    .attach('file', bytes, { filename, ...(contentType ? { contentType } : {}) });
+const download = async (id: string, query = '') =>
+  (await store.signIn('auditor')).get(`/api/files/${id}${query}`).buffer(true).parse(collect);
+
+function collect(response: NodeJS.ReadableStream, done: (error: Error | null, body: Buffer) => void): void {
+  const parts: Buffer[] = [];
+  response.on('data', (part: Buffer) => parts.push(part)).on('end', () => done(null, Buffer.concat(parts)));
+}
+
+const picture = () =>
+  sharp({ create: { width: 320, height: 200, channels: 3, background: '#2266aa' } }).withExif({
+    IFD0: { Artist: 'A person with a name', Copyright: 'EXIF-SECRET' },
+    IFD3: { GPSLatitude: '51/1 30/1 0/1', GPSLatitudeRef: 'N' },
+  });
+
+function buildPdf(more: (document: PDFKit.PDFDocument) => void = () => undefined): Promise<Buffer> {
+  return new Promise((resolve) => {
+    const document = new PDFDocument({ compress: false });
+    const parts: Buffer[] = [];
+    document.on('data', (part: Buffer) => parts.push(part)).on('end', () => resolve(Buffer.concat(parts)));
+    document.text('Certificate 1');
+    more(document);
+    document.end();
+  });
+}
+
+/** A PNG chunk with its length and checksum. */
+function chunk(type: string, data: Buffer): Buffer {
+  const body = Buffer.concat([Buffer.from(type, 'latin1'), data]);
+  const out = Buffer.alloc(body.length + 8);
+  out.writeUInt32BE(data.length, 0);
+  body.copy(out, 4);
+  out.writeUInt32BE(crc32(body), body.length + 4);
+  return out;
+}
+function crc32(bytes: Buffer): number {
+  let crc = ~0;
+  for (const byte of bytes) {
+    crc ^= byte;
+    for (let bit = 0; bit < 8; bit += 1) crc = (crc >>> 1) ^ (crc & 1 ? 0xedb88320 : 0);
+  }
+  return ~crc >>> 0;
+}
+
+/** One bit a pixel, all zero: a hundred kilobytes that unfold to the given size. */
+function buildBomb(width: number, height: number, extra: Buffer[] = []): Buffer {
+  const head = Buffer.alloc(13);
+  head.writeUInt32BE(width, 0);
+  head.writeUInt32BE(height, 4);
+  head.set([1, 0, 0, 0, 0], 8);
+  return Buffer.concat([
+    Buffer.from([0x89, 0x50, 0x4e, 0x47, 0x0d, 0x0a, 0x1a, 0x0a]),
+    chunk('IHDR', head),
+    ...extra,
+    chunk('IDAT', deflateSync(Buffer.alloc((Math.ceil(width / 8) + 1) * height), { level: 9 })),
+    chunk('IEND', Buffer.alloc(0)),
+  ]);
+}
+
+describe('a picture', () => {
+  it.each([
+    ['JPEG', () => picture().jpeg().toBuffer()],
+    ['PNG', () => picture().png().toBuffer()],
+    ['WebP', () => picture().webp().toBuffer()],
+  ])('as %s is kept encoded anew, without what it told besides', async (_, build) => {
+    const original = await build();
+    expect(original.includes('EXIF-SECRET')).toBe(true);
+    const kept = expectStatus<StoredFile>(await upload(original, 'photo.bin', 'text/plain'), 201);
+    expect(kept).toMatchObject({ contentType: 'image/jpeg', originalSha256: hash(original) });
+    const answer = await download(kept.id);
+    const bytes = answer.body as Buffer;
+    expect(answer.headers['content-type']).toBe('image/jpeg');
+    expect(hash(bytes)).toBe(kept.sha256);
+    expect(bytes).toHaveLength(kept.size);
+    const facts = await sharp(bytes).metadata();
+    expect(facts).toMatchObject({ format: 'jpeg', width: 320, height: 200 });
+    expect(facts.exif).toBeUndefined();
+    expect(bytes.includes('EXIF-SECRET')).toBe(false);
+  });
+
+  it('stands upright and is at most so wide, and may be asked for smaller', async () => {
+    const lying = await sharp({ create: { width: 3000, height: 1500, channels: 3, background: '#fff' } })
+      .jpeg()
+      .withMetadata({ orientation: 6 })
+      .toBuffer();
+    const kept = expectStatus<StoredFile>(await upload(lying, 'big.jpg'), 201);
+    const full = await sharp((await download(kept.id)).body as Buffer).metadata();
+    expect([full.width, full.height]).toEqual([LIMITS.imageEdgePx / 2, LIMITS.imageEdgePx]);
+    const small = await sharp((await download(kept.id, '?w=320')).body as Buffer).metadata();
+    expect(small.width).toBe(320);
+    expectProblem(await (await store.signIn('auditor')).get(`/api/files/${kept.id}?w=9999`), 400, 'malformed');
+  });
+
+  it('that hides a page behind its pixels loses it', async () => {
+    const png = await picture().png().toBuffer();
+    const polyglot = Buffer.concat([png, Buffer.from('<script>alert(1)</script><?php system("id") ?>')]);
+    const kept = expectStatus<StoredFile>(await upload(polyglot, 'photo.png'), 201);
+    const answer = await download(kept.id);
+    expect((answer.body as Buffer).includes('<script>')).toBe(false);
+    expect(answer.headers['x-content-type-options']).toBe('nosniff');
+    expect(answer.headers['content-security-policy']).toContain("default-src 'none'");
+  });
+
+  it('is read by nobody who is not signed in', async () => {
+    expectProblem(await store.guest().get(`/api/files/${await work.photo()}`), 401);
+  });
+});
+
+describe('a PDF', () => {
+  it('is kept to the byte, and given as a download', async () => {
+    const pdf = await buildPdf();
+    const kept = expectStatus<StoredFile>(await upload(pdf, 'photo.jpg', 'image/jpeg'), 201);
+    expect(kept).toMatchObject({ contentType: 'application/pdf', sha256: hash(pdf), originalSha256: hash(pdf) });
+    const answer = await download(kept.id);
+    expect((answer.body as Buffer).equals(pdf)).toBe(true);
+    expect(answer.headers['content-disposition']).toMatch(/^attachment/);
+  });
+
+  it('is no photo of a hold', async () => {
+    const kept = expectStatus<StoredFile>(await upload(await buildPdf(), 'a.pdf'), 201);
+    const sling = await work.register();
+    const answer = await (await store.signIn('storekeeper')).patch(`/api/slings/${sling.id}`).send({
+      photoIds: [kept.id],
+    });
+    expectProblem(answer, 422, 'invalid');
+  });
+});
+
+describe('a bad upload', () => {
+  const text = (value: string): Buffer => Buffer.from(value, 'utf8');
+  const cases: [string, number, () => Promise<Buffer> | Buffer, string][] = [
+    ['a script called PNG', 415, () => text('#!/bin/sh\nrm -rf /\n'), 'photo.png'],
+    ['a web page called JPEG', 415, () => text('<!doctype html><script>alert(1)</script>'), 'photo.jpg'],
+    ['an SVG', 415, () => text('<svg xmlns="http://www.w3.org/2000/svg" onload="alert(1)"/>'), 'drawing.svg'],
+    ['an archive', 415, () => Buffer.concat([text('PK\u0003\u0004'), randomBytes(200)]), 'photo.webp'],
+    ['noise', 415, () => randomBytes(5000), 'photo.jpg'],
+    [
+      'a script behind the first bytes of a PNG',
+      422,
+      () => Buffer.concat([buildBomb(8, 8).subarray(0, 33), text('<script>alert(1)</script>'.repeat(20))]),
+      'photo.png',
+    ],
+    ['a GIF', 415, () => sharp({ create: { width: 9, height: 9, channels: 3, background: '#fff' } }).gif().toBuffer(), 'a.gif'],
+    ['half a JPEG', 422, async () => halfOf(await picture().jpeg().toBuffer()), 'photo.jpg'],
+    ['half a PNG', 422, async () => halfOf(await noisePng()), 'photo.png'],
+    ['half a WebP', 422, async () => halfOf(await picture().webp().toBuffer()), 'photo.webp'],
+    ['a picture that unfolds to 900 million pixels', 413, () => buildBomb(30_000, 30_000), 'photo.png'],
+    ['a picture one line wide and endless', 413, () => buildBomb(8, 60_000_000), 'photo.png'],
+    [
+      'a picture that carries 200 MB of packed text',
+      422,
+      () => buildBomb(8, 8, textBombs()),
+      'photo.png',
+    ],
+    ['half a PDF', 422, async () => halfOf(await buildPdf()), 'a.pdf'],
+    ['a PDF with a script', 422, () => buildPdf((pdf) => openAction(pdf, 'JavaScript')), 'a.pdf'],
+    ['a PDF that starts a program', 422, () => buildPdf((pdf) => openAction(pdf, 'Launch')), 'a.pdf'],
+    [
+      'a PDF with a script by another spelling',
+      422,
+      async () => text((await buildPdf((pdf) => openAction(pdf, 'JavaScript'))).toString('latin1').replace('/JavaScript', '/J#61vaScript').replace('/JS', '/#4AS')),
+      'a.pdf',
+    ],
+    ['a PDF with a script in a packed object', 422, () => packedScriptPdf(), 'a.pdf'],
+    ['a PDF with a file in it', 422, () => buildPdf((pdf) => pdf.file(text('MZ'), { name: 'a.exe' })), 'a.pdf'],
+    ['nothing', 400, () => Buffer.alloc(0), 'photo.jpg'],
+  ];
+
+  it.each(cases)('%s is refused with %i, nothing is written, and the server goes on', async (_, status, build, name) => {
+    const bytes = await build();
+    const before = await countRows(store);
+    const answer = await upload(bytes, name);
+    expect(answer.status, answer.text).toBe(status);
+    expect(findProblemFault(answer)).toBeNull();
+    expect(await countRows(store)).toEqual(before);
+    expect((await store.guest().get('/readyz')).status).toBe(200);
+  });
+
+  it.each([
+    ['JSON instead of a form', 415, 'application/json', '{"file":"x"}'],
+    ['a form without an end', 400, 'multipart/form-data; boundary=x', '--x\r\nContent-Disposition: form-data; name="file"; filename="a.jpg"\r\n\r\nabc'],
+    ['a form without a boundary', 400, 'multipart/form-data', '--x\r\n\r\n--x--'],
+    ['a form with another field', 400, 'multipart/form-data; boundary=x', '--x\r\nContent-Disposition: form-data; name="other"; filename="a.jpg"\r\n\r\nabc\r\n--x--\r\n'],
+    ['a text where the file belongs', 400, 'multipart/form-data; boundary=x', '--x\r\nContent-Disposition: form-data; name="file"\r\n\r\nabc\r\n--x--\r\n'],
+  ])('%s is refused with %i', async (_, status, type, body) => {
+    const agent = await store.signIn('storekeeper');
+    expectProblem(await agent.post('/api/files').set('Content-Type', type).send(body), status);
+  });
+
+  it('of a file name with a path in it keeps no path', async () => {
+    const kept = expectStatus<StoredFile>(
+      await upload(await picture().jpeg().toBuffer(), '../../../etc/cron.d/x.jpg'),
+      201,
+    );
+    const answer = await download(kept.id);
+    expect(JSON.stringify(answer.headers)).not.toContain('etc');
+  });
+});
+
+describe('a hundred megabytes', () => {
+  const SIZE = 100 * 1024 * 1024;
+  it.each([
+    ['with its length said beforehand', true],
+    ['without a length', false],
+  ])('%s are refused with 413 and never held in memory', async (_, hasLength) => {
+    const app = openSecondApp(store);
+    const server = app.listen(0);
+    try {
+      const { port } = server.address() as AddressInfo;
+      const signedIn = await fetch(`http://127.0.0.1:${port}/api/session`, {
+        method: 'POST',
+        headers: { 'Content-Type': 'application/json' },
+        body: JSON.stringify({ email: 'storekeeper@marram-quay.example', password: 'marram-quay-demo' }),
+      });
+      const cookie = signedIn.headers.getSetCookie().join('; ').split(';')[0] ?? '';
+      const before = await countRows(store);
+      const { status, body, peakBytes } = await sendZeros(port, cookie, SIZE, hasLength);
+      expect(status).toBe(413);
+      expect(JSON.parse(body)).toMatchObject({ status: 413 });
+      expect(peakBytes).toBeLessThan(60 * 1024 * 1024);
+      expect(await countRows(store)).toEqual(before);
+      expect((await fetch(`http://127.0.0.1:${port}/readyz`)).status).toBe(200);
+    } finally {
+      server.closeAllConnections();
+      await new Promise((resolve) => server.close(resolve));
+    }
+  });
+});
+
+/** Sends a form whose file is zeros, as fast as the server takes them, until it answers. */
+function sendZeros(
+  port: number,
+  cookie: string,
+  size: number,
+  hasLength: boolean,
+): Promise<{ status: number; body: string; peakBytes: number }> {
+  const head = Buffer.from(
+    '--x\r\nContent-Disposition: form-data; name="file"; filename="a.jpg"\r\nContent-Type: image/jpeg\r\n\r\n',
+  );
+  const tail = Buffer.from('\r\n--x--\r\n');
+  const zeros = Buffer.alloc(256 * 1024);
+  const held = (): number => process.memoryUsage().arrayBuffers;
+  const start = held();
+  let peakBytes = 0;
+  return new Promise((resolve, reject) => {
+    const request = http.request({
+      port,
+      host: '127.0.0.1',
+      path: '/api/files',
+      method: 'POST',
+      headers: {
+        Cookie: cookie,
+        'Content-Type': 'multipart/form-data; boundary=x',
+        ...(hasLength ? { 'Content-Length': head.length + size + tail.length } : {}),
+      },
+    });
+    let isAnswered = false;
+    let sent = 0;
+    request.on('response', (response) => {
+      isAnswered = true;
+      const parts: Buffer[] = [];
+      response.on('data', (part: Buffer) => parts.push(part));
+      response.on('end', () => {
+        request.destroy();
+        resolve({ status: response.statusCode ?? 0, body: Buffer.concat(parts).toString(), peakBytes });
+      });
+    });
+    // Once the server has answered it may close the connection while we still send.
+    request.on('error', (error) => (isAnswered ? undefined : reject(error)));
+    const pump = (): void => {
+      while (!isAnswered && sent < size) {
+        peakBytes = Math.max(peakBytes, held() - start);
+        sent += zeros.length;
+        if (!request.write(zeros)) {
+          request.once('drain', () => setImmediate(pump));
+          return;
+        }
+      }
+      if (!isAnswered) request.end(tail);
+    };
+    request.write(head);
+    pump();
+  });
+}
+
+const halfOf = (bytes: Buffer): Buffer => bytes.subarray(0, Math.floor(bytes.length / 2));
+const noisePng = (): Promise<Buffer> =>
+  sharp(randomBytes(64 * 64 * 3), { raw: { width: 64, height: 64, channels: 3 } }).png().toBuffer();
+
+function textBombs(): Buffer[] {
+  const packed = deflateSync(Buffer.alloc(50 * 1024 * 1024), { level: 9 });
+  return [1, 2, 3, 4].map((n) => chunk('zTXt', Buffer.concat([Buffer.from(`Comment${n}\0\0`), packed])));
+}
+
+/** What runs when the document is opened. */
+function openAction(pdf: PDFKit.PDFDocument, kind: 'JavaScript' | 'Launch'): void {
+  const action = pdf.ref(
+    kind === 'JavaScript'
+      ? { Type: 'Action', S: 'JavaScript', JS: new String('app.alert(1)') }
+      : { Type: 'Action', S: 'Launch', F: new String('a.exe') },
+  );
+  action.end('');
+  Object.assign(pdf._root.data as object, { OpenAction: action });
+}
+
+/** An object stream: the dictionary with the script is deflated, so that its name stands nowhere in the bytes. */
+function packedScriptPdf(): Buffer {
+  const objects = '4 0 << /Type /Action /S /JavaScript /JS (app.alert\\(1\\)) >>';
+  const packed = deflateSync(Buffer.from(objects));
+  return Buffer.concat([
+    Buffer.from(
+      `%PDF-1.5\n1 0 obj\n<< /Type /Catalog /OpenAction 4 0 R >>\nendobj\n2 0 obj\n<< /Type /ObjStm /N 1 /First 4 /Length ${packed.length} /Filter /FlateDecode >>\nstream\n`,
+    ),
+    packed,
+    Buffer.from('\nendstream\nendobj\nstartxref\n0\n%%EOF\n'),
+  ]);
+}

@@ -1,0 +1,375 @@
+import { createHash } from 'node:crypto';
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import type { Sling } from '../../../shared/schemas/slings';
+import { expectStatus } from '../../support/work';
+import { verifyLedger } from './calls';
+import { openScenes, type Scenes } from './scenes';
+
+let scenes: Scenes;
+/** A sling in each state that a forger would start from. */
+let received: Sling;
+let held: Sling;
+let condemned: Sling;
+let inService: Sling;
+let rejected: Sling;
+
+beforeAll(async () => {
+  scenes = await openScenes();
+  received = await scenes.work.register();
+  held = await scenes.held();
+  condemned = await scenes.condemned();
+  inService = await scenes.work.inService();
+  rejected = (await scenes.work.inspect(await scenes.work.inService(), 'frequent', { seen: ['chain.crack'] }))
+    .sling;
+});
+afterAll(() => scenes.close());
+
+type Account = 'appQuery' | 'adminQuery';
+const ACCOUNTS: Account[] = ['appQuery', 'adminQuery'];
+/** The triggers' own refusal, or a right that the account does not have. */
+const REFUSED = /45000|denied/;
+
+async function expectRefused(account: Account, sql: string, values: unknown[] = []): Promise<void> {
+  await expect(scenes.store.database[account](sql, values), `${account}: ${sql}`).rejects.toThrow(REFUSED);
+}
+
+const rowOf = async (sling: Pick<Sling, 'id'>): Promise<Record<string, unknown>> =>
+  (await scenes.store.database.adminQuery('SELECT * FROM slings WHERE id = ?', [sling.id]))[0] ?? {};
+
+describe.each(ACCOUNTS)('with %s, the sling’s row', (account) => {
+  it.each([
+    "state = 'in_service'",
+    "state = 'held'",
+    "state = 'departed'",
+    'condemned = 1',
+    'condemned = 0, condemned_by = NULL',
+    "custody_kind = 'in_store'",
+    'custody_location_id = NULL',
+    'ledger_count = ledger_count + 1',
+    'ledger_count = 0',
+    "head_hash = REPEAT('0', 64)",
+    "state = 'in_service', condemned = 0, condemned_by = NULL, ledger_count = ledger_count + 1",
+    'last_in_service_seq = 1',
+    'last_sent_seq = NULL, came_back_seq = 2',
+    "state_since = '2020-01-01'",
+    'condemned_by = 1',
+  ])('is not moved by SET %s', async (assignment) => {
+    // Whatever the statement is, one of these would change by it.
+    const slings = [received, held, condemned, rejected];
+    const before = await Promise.all(slings.map(rowOf));
+    const tries = await Promise.allSettled(
+      slings.map((sling) =>
+        scenes.store.database[account](`UPDATE slings SET ${assignment} WHERE id = ${sling.id}`),
+      ),
+    );
+    expect(await Promise.all(slings.map(rowOf))).toEqual(before);
+    const errors = tries.flatMap((one) => (one.status === 'rejected' ? [String(one.reason)] : []));
+    expect(errors.length).toBeGreaterThan(0);
+    for (const error of errors) expect(error).toMatch(REFUSED);
+  });
+
+  it('is neither deleted nor put in as anything but received', async () => {
+    await expectRefused(account, `DELETE FROM slings WHERE id = ${received.id}`);
+    const columns = (await scenes.store.database.adminQuery('SHOW COLUMNS FROM slings')).map(({ Field }) =>
+      String(Field),
+    );
+    const copied = (changes: Record<string, string>): string =>
+      columns
+        .filter((column) => column !== 'id')
+        .map((column) => changes[column] ?? `\`${column}\``)
+        .join(', ');
+    const insert = (changes: Record<string, string>): string =>
+      `INSERT INTO slings (${columns.filter((column) => column !== 'id').join(', ')})
+       SELECT ${copied({ number: "'FORGED'", maker_serial: "'FORGED'", ...changes })} FROM slings WHERE id = ${inService.id}`;
+    await expectRefused(account, insert({}));
+    const fresh = { ledger_count: '0', head_hash: "REPEAT('0', 64)", last_in_service_seq: 'NULL' };
+    await expectRefused(account, insert({ ...fresh }));
+    await expectRefused(account, insert({ ...fresh, state: "'received'", last_in_service_seq: '1' }));
+  });
+});
+
+interface Forged {
+  type: string;
+  to: string;
+  from?: string;
+  seq?: number;
+  prevHash?: string;
+  condemned?: boolean;
+}
+
+/** A ledger row as a forger would write it: all columns right but for what is forged. */
+async function insertLedger(account: Account, sling: Sling, forged: Forged): Promise<void> {
+  const now = await rowOf(sling);
+  await scenes.store.database[account](
+    `INSERT INTO ledger (sling_id, sling_seq, type, at, actor_id, actor_name, from_state, to_state, condemned,
+       custody_kind, custody_location_id, data, prev_hash, hash)
+     VALUES (?, ?, ?, UTC_TIMESTAMP(3), NULL, 'Nobody', ?, ?, ?, ?, ?, '{}', ?, ?)`,
+    [
+      sling.id,
+      forged.seq ?? Number(now.ledger_count) + 1,
+      forged.type,
+      forged.from ?? String(now.state),
+      forged.to,
+      forged.condemned ?? Boolean(now.condemned),
+      now.custody_kind,
+      now.custody_location_id,
+      forged.prevHash ?? String(now.head_hash),
+      createHash('sha256').update(JSON.stringify(forged)).digest('hex'),
+    ],
+  );
+}
+
+describe.each(ACCOUNTS)('with %s, a ledger row', (account) => {
+  const refusedRows: [string, () => Sling, Forged, RegExp][] = [
+    ['skips a place', () => held, { type: 'secure', to: 'held', seq: 99 }, /head of the chain/],
+    ['takes a place again', () => held, { type: 'secure', to: 'held', seq: 1 }, /head of the chain/],
+    [
+      'follows another hash',
+      () => held,
+      { type: 'secure', to: 'held', prevHash: 'a'.repeat(64) },
+      /head of the chain/,
+    ],
+    [
+      'starts elsewhere',
+      () => held,
+      { type: 'accept', from: 'received', to: 'in_service' },
+      /start from the state/,
+    ],
+    ['accepts a held sling', () => held, { type: 'accept', to: 'in_service' }, /lifecycle table/],
+    ['releases what is condemned', () => condemned, { type: 'release', to: 'in_service' }, /lifecycle table/],
+    [
+      'ends a condemnation by hold',
+      () => condemned,
+      { type: 'hold', to: 'held', condemned: false },
+      /lifecycle table/,
+    ],
+    ['condemns by hold', () => held, { type: 'hold', to: 'held', condemned: true }, /lifecycle table/],
+    ['departs a condemned sling', () => condemned, { type: 'depart', to: 'departed' }, /lifecycle table/],
+    ['destroys what is not condemned', () => held, { type: 'destroy', to: 'destroyed' }, /lifecycle table/],
+    [
+      'moves by an event of the record',
+      () => held,
+      { type: 'inspected', to: 'in_service' },
+      /lifecycle table/,
+    ],
+    ['moves by an unknown event', () => held, { type: 'override', to: 'in_service' }, /lifecycle table/],
+    ['registers it again', () => held, { type: 'registered', to: 'received' }, /lifecycle table/],
+    [
+      'releases over an open reason',
+      () => held,
+      { type: 'release', to: 'in_service' },
+      /reason of a hold is still open/,
+    ],
+    [
+      'releases what was rejected',
+      () => rejected,
+      { type: 'release', to: 'in_service' },
+      /reason of a hold is still open/,
+    ],
+    [
+      'accepts without a live label',
+      () => received,
+      { type: 'accept', to: 'in_service' },
+      /No label is confirmed/,
+    ],
+  ];
+
+  it.each(refusedRows)('is refused when it %s', async (_what, sling, forged, message) => {
+    await expect(insertLedger(account, sling(), forged)).rejects.toThrow(message);
+    const now = await rowOf(sling());
+    expect([now.ledger_count, now.state]).toEqual([sling().version, sling().state]);
+  });
+
+  it('is refused when no complete inspection has passed', async () => {
+    const labelled = await scenes.work.register();
+    await scenes.work.confirm(labelled, await scenes.work.label(labelled));
+    await expect(insertLedger(account, labelled, { type: 'accept', to: 'in_service' })).rejects.toThrow(
+      /No complete inspection/,
+    );
+  });
+
+  it('is never changed and never deleted', async () => {
+    for (const change of [
+      "actor_name = 'Somebody else'",
+      "data = '{}'",
+      "to_state = 'in_service'",
+      "at = '2020-01-01'",
+    ]) {
+      await expectRefused(account, `UPDATE ledger SET ${change} WHERE sling_id = ${held.id}`);
+    }
+    await expectRefused(account, `DELETE FROM ledger WHERE sling_id = ${held.id}`);
+    await expectRefused(
+      account,
+      `REPLACE INTO ledger SELECT * FROM ledger WHERE sling_id = ${held.id} LIMIT 1`,
+    );
+  });
+});
+
+describe.each(ACCOUNTS)('with %s, what the ledger’s rows stand on', (account) => {
+  it('keeps a cleared reason cleared and a confirmed one confirmed', async () => {
+    const { work } = scenes;
+    const released = await scenes.held();
+    await work.inspect(released, 'release');
+    await work.act('inspector', released, 'release', scenes.releaseBody(released));
+    const where = `WHERE sling_id = ${released.id}`;
+    await expectRefused(account, `UPDATE hold_reasons SET cleared_at = NULL, cleared_by = NULL ${where}`);
+    await expectRefused(account, `UPDATE hold_reasons SET clear_note = 'Another' ${where}`);
+    await expectRefused(account, `DELETE FROM hold_reasons ${where}`);
+    const confirmed = `WHERE sling_id = ${rejected.id}`;
+    await expectRefused(account, `UPDATE hold_reasons SET cleared_at = UTC_TIMESTAMP(3) ${confirmed}`);
+    await expectRefused(account, `UPDATE hold_reasons SET confirmed = 0 ${confirmed}`);
+    await expectRefused(account, `UPDATE hold_reasons SET code = 'latch' ${confirmed}`);
+    await expectRefused(account, `UPDATE hold_reasons SET placed_by = NULL ${confirmed}`);
+    await expectRefused(account, `UPDATE hold_reasons SET placed_seq = 0 ${confirmed}`);
+    await expectRefused(account, `UPDATE hold_reasons SET sling_id = ${received.id} ${confirmed}`);
+    await expectRefused(account, `DELETE FROM hold_reasons ${confirmed}`);
+  });
+
+  it('never brings a void label back, nor moves a live one to another sling', async () => {
+    const { work } = scenes;
+    const sling = await work.inService();
+    await work.label(sling, 'lost');
+    const isVoid = `WHERE sling_id = ${sling.id} AND status = 'void'`;
+    await expectRefused(account, `UPDATE tags SET status = 'live' ${isVoid}`);
+    await expectRefused(account, `UPDATE tags SET status = 'printed' ${isVoid}`);
+    const live = `WHERE sling_id = ${inService.id} AND status = 'live'`;
+    await expectRefused(account, `UPDATE tags SET status = 'printed' ${live}`);
+    await expectRefused(account, `UPDATE tags SET sling_id = ${held.id} ${live}`);
+    await expectRefused(account, `UPDATE tags SET code = '0000000000' ${live}`);
+    await expectRefused(account, `DELETE FROM tags ${live}`);
+  });
+
+  it('never changes or deletes an inspection', async () => {
+    const where = `WHERE sling_id = ${rejected.id}`;
+    await expectRefused(account, `UPDATE inspections SET verdict = 'pass' ${where}`);
+    await expectRefused(account, `UPDATE inspections SET inspector_id = 1 ${where}`);
+    await expectRefused(account, `DELETE FROM inspections ${where}`);
+  });
+});
+
+describe('the working account', () => {
+  it.each([
+    'DROP TRIGGER ledger_rows_stay',
+    'CREATE TRIGGER mine BEFORE INSERT ON ledger FOR EACH ROW SET @a = 1',
+    'ALTER TABLE slings DROP CONSTRAINT slings_condemned',
+    'ALTER TABLE ledger ADD COLUMN extra INT',
+    'DROP TABLE ledger',
+    'TRUNCATE TABLE ledger',
+    'RENAME TABLE ledger TO old_ledger',
+    'CREATE TABLE mine (id INT)',
+    'CREATE PROCEDURE mine() SELECT 1',
+    "INSERT INTO lifecycle_transitions VALUES ('accept', 'held', 0, 'in_service', 0)",
+    "UPDATE lifecycle_transitions SET to_state = 'in_service'",
+    'DELETE FROM lifecycle_transitions',
+    "INSERT INTO migrations (name) VALUES ('mine')",
+    'SET GLOBAL read_only = 1',
+    'GRANT ALL ON *.* TO CURRENT_USER()',
+    'SELECT * FROM mysql.global_priv',
+  ])('may not %s', async (sql) => {
+    await expect(scenes.store.database.appQuery(sql)).rejects.toThrow(/denied/);
+  });
+});
+
+describe('a forger who may drop triggers', () => {
+  /** As somebody with every right and a grudge would do it. */
+  async function forge(sql: string): Promise<void> {
+    const { adminQuery } = scenes.store.database;
+    const names = ['ledger_rows_stay', 'ledger_rows_are_kept', 'slings_move_by_ledger'];
+    const bodies = new Map<string, string>();
+    for (const name of names) {
+      const [shown] = await adminQuery(`SHOW CREATE TRIGGER ${name}`);
+      bodies.set(name, String(shown?.['SQL Original Statement']));
+      await adminQuery(`DROP TRIGGER ${name}`);
+    }
+    try {
+      await adminQuery(sql);
+    } finally {
+      for (const body of bodies.values()) await adminQuery(body);
+    }
+  }
+  const fresh = async (): Promise<Sling> => {
+    const sling = await scenes.held();
+    expect(await verifyLedger(scenes.store, sling.id)).toMatchObject({
+      ok: true,
+      rows: sling.version,
+      slings: 1,
+    });
+    return sling;
+  };
+
+  it.each([
+    "actor_name = 'Somebody else'",
+    'actor_id = NULL',
+    'at = at - INTERVAL 1 SECOND',
+    "type = 'moved'",
+    "to_state = 'held'",
+    "from_state = 'held'",
+    'condemned = 1',
+    "custody_kind = 'cage'",
+    'custody_location_id = 1',
+    `data = '{"verdict":"pass"}'`,
+    "data = 'no JSON at all'",
+    "prev_hash = REPEAT('1', 64)",
+    "hash = REPEAT('1', 64)",
+  ])('is found and named when a row’s %s', async (assignment) => {
+    const sling = await fresh();
+    await forge(`UPDATE ledger SET ${assignment} WHERE sling_id = ${sling.id} AND sling_seq = 3`);
+    const found = await verifyLedger(scenes.store, sling.id);
+    expect(found.ok).toBe(false);
+    expect(found.firstBad).toMatchObject({ slingId: sling.id });
+    // A changed hash is seen at the row itself.
+    expect(found.firstBad?.slingSeq).toBe(3);
+    expect(found.firstBad?.message).toMatch(/Row 3/);
+    // The check of everything names it as well.
+    expect((await verifyLedger(scenes.store)).ok).toBe(false);
+  });
+
+  it('is found and named when a row is taken out, the first, one between or the last', async () => {
+    for (const which of ['first', 'middle', 'last'] as const) {
+      const sling = await fresh();
+      const seq = { first: 1, middle: 3, last: sling.version }[which];
+      await forge(`DELETE FROM ledger WHERE sling_id = ${sling.id} AND sling_seq = ${seq}`);
+      const found = await verifyLedger(scenes.store, sling.id);
+      expect([which, found.ok, found.firstBad?.slingId, found.firstBad?.slingSeq]).toEqual([
+        which,
+        false,
+        sling.id,
+        seq,
+      ]);
+    }
+  });
+
+  it('is found when the head is set back with the last row', async () => {
+    const sling = await fresh();
+    await forge(`DELETE FROM ledger WHERE sling_id = ${sling.id} AND sling_seq = ${sling.version}`);
+    await forge(`UPDATE slings SET ledger_count = ledger_count - 1 WHERE id = ${sling.id}`);
+    expect((await verifyLedger(scenes.store, sling.id)).firstBad?.slingId).toBe(sling.id);
+  });
+
+  it('is found when two rows change places', async () => {
+    const sling = await fresh();
+    await forge(`UPDATE ledger SET sling_seq = 900 WHERE sling_id = ${sling.id} AND sling_seq = 2;
+      UPDATE ledger SET sling_seq = 2 WHERE sling_id = ${sling.id} AND sling_seq = 3;
+      UPDATE ledger SET sling_seq = 3 WHERE sling_id = ${sling.id} AND sling_seq = 900`);
+    expect((await verifyLedger(scenes.store, sling.id)).firstBad).toMatchObject({
+      slingId: sling.id,
+      slingSeq: 2,
+    });
+  });
+
+  it('is found when a row was put in with a hash that is not its own', async () => {
+    const sling = await fresh();
+    // The database cannot compute the canonical form: it lets a well-placed row in, and the check names it.
+    await insertLedger('adminQuery', sling, { type: 'secure', to: 'held' });
+    expect((await verifyLedger(scenes.store, sling.id)).firstBad).toMatchObject({
+      slingId: sling.id,
+      slingSeq: sling.version + 1,
+    });
+  });
+
+  it('leaves the guards as they were', async () => {
+    await expectRefused('adminQuery', `UPDATE slings SET state = 'in_service' WHERE id = ${held.id}`);
+    await expectRefused('adminQuery', `DELETE FROM ledger WHERE sling_id = ${held.id}`);
+    expectStatus(await (await scenes.store.signIn('storekeeper')).get(`/api/slings/${held.id}`), 200);
+  });
+});
