@@ -4,6 +4,7 @@ import type { StoredFile } from '../../shared/schemas/files';
 import { LIMITS } from '../../shared/limits';
 import { AppError } from '../errors';
 import { sha256 } from '../security/sha256';
+import { checkPdf } from './checkPdf';
 
 export interface AcceptedUpload {
   bytes: Buffer;
@@ -13,8 +14,6 @@ export interface AcceptedUpload {
 }
 
 const IMAGE_TYPES = ['image/jpeg', 'image/png', 'image/webp'];
-/** Content that acts when a PDF is opened. */
-const ACTIVE_PDF = /\/(?:JavaScript|JS|Launch|EmbeddedFile|RichMedia|XFA)\b/;
 
 /**
  * Looks at what the bytes are, whatever they are called, and keeps only what is safe to show: pictures are
@@ -54,15 +53,5 @@ async function encodeAnew(original: Buffer): Promise<Buffer> {
       throw new AppError('too-large', 'The picture has too many pixels.');
     }
     throw new AppError('invalid', 'The picture is broken and cannot be read. Please take it again.');
-  }
-}
-
-function checkPdf(bytes: Buffer): void {
-  const text = bytes.toString('latin1');
-  if (!text.startsWith('%PDF-') || !text.slice(-2048).includes('%%EOF')) {
-    throw new AppError('invalid', 'The PDF is not whole. Please save it again.');
-  }
-  if (ACTIVE_PDF.test(text)) {
-    throw new AppError('invalid', 'The PDF holds scripts or attached files. Please print it to a plain PDF.');
   }
 }

@@ -1,5 +1,10 @@
 import { Op, QueryTypes, type Sequelize } from 'sequelize';
-import { CHAIN_START, followChain, type LedgerContent } from '../../shared/domain/ledger/chain';
+import {
+  canonicalJson,
+  CHAIN_START,
+  followChain,
+  type LedgerContent,
+} from '../../shared/domain/ledger/chain';
 import type { LedgerEventType } from '../../shared/domain/lifecycle/events';
 import type { CustodyKind, SlingState } from '../../shared/domain/lifecycle/states';
 import type { LedgerRow, VerifyResponse } from '../../shared/schemas/ledger';
@@ -22,9 +27,19 @@ function contentOf(entry: LedgerEntry): LedgerContent {
     to: entry.toState as SlingState,
     condemned: Boolean(entry.condemned),
     custody: { kind: entry.custodyKind as CustodyKind, locationId: entry.custodyLocationId },
-    data: JSON.parse(entry.data) as Record<string, unknown>,
+    data: readData(entry.data),
     prevHash: entry.prevHash,
   };
+}
+
+/** Text that is not as it was written is shown as it stands, so that its hash no longer fits and the row is named. */
+function readData(text: string): Record<string, unknown> {
+  try {
+    const data = JSON.parse(text) as Record<string, unknown>;
+    return canonicalJson(data) === text ? data : { unreadable: text };
+  } catch {
+    return { unreadable: text };
+  }
 }
 
 export async function listLedger(

@@ -71,7 +71,11 @@ function addFilters(where: Where, query: SlingsQuery): void {
   if (query.condemned) add('s.condemned = ?', query.condemned === 'true');
   if (query.label === 'live') add('tl.code IS NOT NULL');
   if (query.label === 'printed') add('tp.code IS NOT NULL');
-  if (query.label === 'none') add('tl.code IS NULL AND tp.code IS NULL');
+  if (query.label === 'none') {
+    add('tl.code IS NULL AND tp.code IS NULL');
+    // One that is gone needs no label any more.
+    if (!query.state) add("s.state NOT IN ('destroyed', 'departed')");
+  }
 }
 
 /** "Today" differs by site: sites whose calendars agree share one condition. */

@@ -13,7 +13,9 @@ import { findUser } from '../middleware/authenticate';
 import { FileRecord } from '../models/FileRecord';
 import { Tag } from '../models/Tag';
 import { getTagCode } from '../commands/handleTags';
-import { raw } from '../routing/define';
+import { raw, readRepeatKey, sendAnswer } from '../routing/define';
+import type { Answer } from '../routing/route';
+import { transact } from '../routing/transact';
 import { codeParams } from './params';
 
 const receive = multer({
@@ -40,23 +42,36 @@ async function readUpload(request: Request, response: Response): Promise<Express
 
 async function keepUpload(
   services: Services,
+  request: Request,
   file: Express.Multer.File,
-  owner: { createdBy: number | null; publicCode: string | null },
-): Promise<StoredFile> {
+  publicCode: string | null,
+): Promise<Answer> {
   const { bytes, contentType, sha256, originalSha256 } = await acceptUpload(file.buffer);
   await services.files.put(sha256, bytes);
-  const record = await FileRecord.create({
-    id: randomUUID(),
-    sha256,
-    originalSha256,
-    contentType,
-    size: bytes.length,
-    // The field arrives as bytes that were read as Latin-1.
-    originalName: Buffer.from(file.originalname, 'latin1').toString('utf8').slice(0, 255),
-    ...owner,
-    createdAt: services.now(),
-  });
-  return { id: record.id, sha256, originalSha256, contentType, size: bytes.length };
+  const user = findUser(request);
+  return transact(
+    { ...services, user },
+    readRepeatKey(request, originalSha256),
+    async ({ at, transaction }) => {
+      const record = await FileRecord.create(
+        {
+          id: randomUUID(),
+          sha256,
+          originalSha256,
+          contentType,
+          size: bytes.length,
+          // The field arrives as bytes that were read as Latin-1.
+          originalName: Buffer.from(file.originalname, 'latin1').toString('utf8').slice(0, 255),
+          createdBy: user?.id ?? null,
+          publicCode,
+          createdAt: at,
+        },
+        { transaction },
+      );
+      const body: StoredFile = { id: record.id, sha256, originalSha256, contentType, size: bytes.length };
+      return { status: 201, body };
+    },
+  );
 }
 
 const fileParams = z.object({ id: fileIdSchema });
@@ -70,8 +85,7 @@ export const fileRoutes = [
     limit: 'upload',
     async handle(services, { request, response }) {
       const file = await readUpload(request, response);
-      const owner = { createdBy: findUser(request)?.id ?? null, publicCode: null };
-      response.status(201).json(await keepUpload(services, file, owner));
+      sendAnswer(response, await keepUpload(services, request, file, null));
     },
   }),
   raw({
@@ -111,8 +125,7 @@ export const fileRoutes = [
       const code = getTagCode(params.code);
       if (!(await Tag.findByPk(code, { attributes: ['code'] }))) throw new NotFoundError('label');
       const file = await readUpload(request, response);
-      const kept = await keepUpload(services, file, { createdBy: null, publicCode: code });
-      response.status(201).json(kept);
+      sendAnswer(response, await keepUpload(services, request, file, code));
     },
   }),
 ];

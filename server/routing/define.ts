@@ -35,7 +35,7 @@ export function write<P = unknown, B = unknown, L = undefined, R = undefined>(
       const body = parseBody(schema ?? (z.strictObject({}) as unknown as z.ZodType<B>), raw);
       const ifMatch = readIfMatch(request);
       const prepared = (spec.prepare ? await spec.prepare(base, { params, body }) : undefined) as R;
-      const answer = await transact(base, readRepeatKey(request, raw, spec.isSecret ?? false), (context) =>
+      const answer = await transact(base, readRepeatKey(request, raw, spec.isSecret), (context) =>
         spec.handle(context, { params, body, loaded, prepared, ifMatch }),
       );
       sendAnswer(response, answer);
@@ -55,7 +55,7 @@ export function raw<P = unknown, Q = unknown>(spec: Omit<RawRoute<P, Q>, 'kind'>
   };
 }
 
-function sendAnswer(response: Response, answer: Answer): void {
+export function sendAnswer(response: Response, answer: Answer): void {
   if (answer.version !== undefined) response.set('ETag', `"${answer.version}"`);
   const status = answer.status ?? 200;
   if (answer.body === undefined) response.status(status === 200 ? 204 : status).end();
@@ -71,7 +71,8 @@ function readIfMatch(request: Request): number | null {
   return Number(match[1]);
 }
 
-function readRepeatKey(request: Request, body: unknown, isSecret: boolean): RepeatKey | null {
+/** @param body what makes two requests with the same key the same */
+export function readRepeatKey(request: Request, body: unknown, isSecret = false): RepeatKey | null {
   const key = request.get('Idempotency-Key');
   if (key === undefined) return null;
   if (!/^[\x21-\x7e]{1,128}$/.test(key)) {

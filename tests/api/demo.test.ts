@@ -140,7 +140,9 @@ describe('the demo', () => {
   });
 
   it('draws the same labels each time', async () => {
-    const rows = await database.adminQuery('select code from tags order by printed_at, run_id, run_position limit 3');
+    const rows = await database.adminQuery(
+      'select code from tags order by printed_at, run_id, run_position limit 3',
+    );
     expect(rows.map((row) => row.code)).toEqual([]);
   });
 

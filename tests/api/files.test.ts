@@ -4,6 +4,7 @@ import type { AddressInfo } from 'node:net';
 import { deflateSync } from 'node:zlib';
 import PDFDocument from 'pdfkit';
 import sharp from 'sharp';
+import type { Response } from 'superagent';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { LIMITS } from '../../shared/limits';
 import type { StoredFile } from '../../shared/schemas/files';
@@ -27,7 +28,7 @@ const upload = async (bytes: Buffer, filename: string, contentType?: string) =>
 const download = async (id: string, query = '') =>
   (await store.signIn('auditor')).get(`/api/files/${id}${query}`).buffer(true).parse(collect);
 
-function collect(response: NodeJS.ReadableStream, done: (error: Error | null, body: Buffer) => void): void {
+function collect(response: Response, done: (error: Error | null, body: Buffer) => void): void {
   const parts: Buffer[] = [];
   response.on('data', (part: Buffer) => parts.push(part)).on('end', () => done(null, Buffer.concat(parts)));
 }
@@ -113,7 +114,11 @@ describe('a picture', () => {
     expect([full.width, full.height]).toEqual([LIMITS.imageEdgePx / 2, LIMITS.imageEdgePx]);
     const small = await sharp((await download(kept.id, '?w=320')).body as Buffer).metadata();
     expect(small.width).toBe(320);
-    expectProblem(await (await store.signIn('auditor')).get(`/api/files/${kept.id}?w=9999`), 400, 'malformed');
+    expectProblem(
+      await (await store.signIn('auditor')).get(`/api/files/${kept.id}?w=9999`),
+      400,
+      'malformed',
+    );
   });
 
   it('that hides a page behind its pixels loses it', async () => {
@@ -126,6 +131,11 @@ describe('a picture', () => {
     expect(answer.headers['content-security-policy']).toContain("default-src 'none'");
   });
 
+  it('loses the megabytes of packed text that it carries', async () => {
+    const kept = expectStatus<StoredFile>(await upload(buildBomb(8, 8, [textBomb()]), 'photo.png'), 201);
+    expect(kept.size).toBeLessThan(2000);
+  });
+
   it('is read by nobody who is not signed in', async () => {
     expectProblem(await store.guest().get(`/api/files/${await work.photo()}`), 401);
   });
@@ -135,10 +145,19 @@ describe('a PDF', () => {
   it('is kept to the byte, and given as a download', async () => {
     const pdf = await buildPdf();
     const kept = expectStatus<StoredFile>(await upload(pdf, 'photo.jpg', 'image/jpeg'), 201);
-    expect(kept).toMatchObject({ contentType: 'application/pdf', sha256: hash(pdf), originalSha256: hash(pdf) });
+    expect(kept).toMatchObject({
+      contentType: 'application/pdf',
+      sha256: hash(pdf),
+      originalSha256: hash(pdf),
+    });
     const answer = await download(kept.id);
     expect((answer.body as Buffer).equals(pdf)).toBe(true);
     expect(answer.headers['content-disposition']).toMatch(/^attachment/);
+  });
+
+  it('is not taken for a script by chance: packed pictures hold any bytes', async () => {
+    const chance = await buildPdf((pdf) => pdf.ref({}).end(Buffer.from('.../JS /XFA /S ...', 'latin1')));
+    expect((await upload(chance, 'scan.pdf')).status).toBe(201);
   });
 
   it('is no photo of a hold', async () => {
@@ -165,48 +184,79 @@ describe('a bad upload', () => {
       () => Buffer.concat([buildBomb(8, 8).subarray(0, 33), text('<script>alert(1)</script>'.repeat(20))]),
       'photo.png',
     ],
-    ['a GIF', 415, () => sharp({ create: { width: 9, height: 9, channels: 3, background: '#fff' } }).gif().toBuffer(), 'a.gif'],
+    [
+      'a GIF',
+      415,
+      () =>
+        sharp({ create: { width: 9, height: 9, channels: 3, background: '#fff' } })
+          .gif()
+          .toBuffer(),
+      'a.gif',
+    ],
     ['half a JPEG', 422, async () => halfOf(await picture().jpeg().toBuffer()), 'photo.jpg'],
     ['half a PNG', 422, async () => halfOf(await noisePng()), 'photo.png'],
     ['half a WebP', 422, async () => halfOf(await picture().webp().toBuffer()), 'photo.webp'],
     ['a picture that unfolds to 900 million pixels', 413, () => buildBomb(30_000, 30_000), 'photo.png'],
     ['a picture one line wide and endless', 413, () => buildBomb(8, 60_000_000), 'photo.png'],
-    [
-      'a picture that carries 200 MB of packed text',
-      422,
-      () => buildBomb(8, 8, textBombs()),
-      'photo.png',
-    ],
     ['half a PDF', 422, async () => halfOf(await buildPdf()), 'a.pdf'],
     ['a PDF with a script', 422, () => buildPdf((pdf) => openAction(pdf, 'JavaScript')), 'a.pdf'],
     ['a PDF that starts a program', 422, () => buildPdf((pdf) => openAction(pdf, 'Launch')), 'a.pdf'],
     [
       'a PDF with a script by another spelling',
       422,
-      async () => text((await buildPdf((pdf) => openAction(pdf, 'JavaScript'))).toString('latin1').replace('/JavaScript', '/J#61vaScript').replace('/JS', '/#4AS')),
+      async () =>
+        text(
+          (await buildPdf((pdf) => openAction(pdf, 'JavaScript')))
+            .toString('latin1')
+            .replace('/JavaScript', '/J#61vaScript')
+            .replace('/JS', '/#4AS'),
+        ),
       'a.pdf',
     ],
     ['a PDF with a script in a packed object', 422, () => packedScriptPdf(), 'a.pdf'],
-    ['a PDF with a file in it', 422, () => buildPdf((pdf) => pdf.file(text('MZ'), { name: 'a.exe' })), 'a.pdf'],
+    [
+      'a PDF with a file in it',
+      422,
+      () => buildPdf((pdf) => pdf.file(text('MZ'), { name: 'a.exe' })),
+      'a.pdf',
+    ],
     ['nothing', 400, () => Buffer.alloc(0), 'photo.jpg'],
   ];
 
-  it.each(cases)('%s is refused with %i, nothing is written, and the server goes on', async (_, status, build, name) => {
-    const bytes = await build();
-    const before = await countRows(store);
-    const answer = await upload(bytes, name);
-    expect(answer.status, answer.text).toBe(status);
-    expect(findProblemFault(answer)).toBeNull();
-    expect(await countRows(store)).toEqual(before);
-    expect((await store.guest().get('/readyz')).status).toBe(200);
-  });
+  it.each(cases)(
+    '%s is refused with %i, nothing is written, and the server goes on',
+    async (_, status, build, name) => {
+      const bytes = await build();
+      const before = await countRows(store);
+      const answer = await upload(bytes, name);
+      expect(answer.status, answer.text).toBe(status);
+      expect(findProblemFault(answer)).toBeNull();
+      expect(await countRows(store)).toEqual(before);
+      expect((await store.guest().get('/readyz')).status).toBe(200);
+    },
+  );
 
   it.each([
     ['JSON instead of a form', 415, 'application/json', '{"file":"x"}'],
-    ['a form without an end', 400, 'multipart/form-data; boundary=x', '--x\r\nContent-Disposition: form-data; name="file"; filename="a.jpg"\r\n\r\nabc'],
+    [
+      'a form without an end',
+      400,
+      'multipart/form-data; boundary=x',
+      '--x\r\nContent-Disposition: form-data; name="file"; filename="a.jpg"\r\n\r\nabc',
+    ],
     ['a form without a boundary', 400, 'multipart/form-data', '--x\r\n\r\n--x--'],
-    ['a form with another field', 400, 'multipart/form-data; boundary=x', '--x\r\nContent-Disposition: form-data; name="other"; filename="a.jpg"\r\n\r\nabc\r\n--x--\r\n'],
-    ['a text where the file belongs', 400, 'multipart/form-data; boundary=x', '--x\r\nContent-Disposition: form-data; name="file"\r\n\r\nabc\r\n--x--\r\n'],
+    [
+      'a form with another field',
+      400,
+      'multipart/form-data; boundary=x',
+      '--x\r\nContent-Disposition: form-data; name="other"; filename="a.jpg"\r\n\r\nabc\r\n--x--\r\n',
+    ],
+    [
+      'a text where the file belongs',
+      400,
+      'multipart/form-data; boundary=x',
+      '--x\r\nContent-Disposition: form-data; name="file"\r\n\r\nabc\r\n--x--\r\n',
+    ],
   ])('%s is refused with %i', async (_, status, type, body) => {
     const agent = await store.signIn('storekeeper');
     expectProblem(await agent.post('/api/files').set('Content-Type', type).send(body), status);
@@ -218,7 +268,7 @@ describe('a bad upload', () => {
       201,
     );
     const answer = await download(kept.id);
-    expect(JSON.stringify(answer.headers)).not.toContain('etc');
+    expect(JSON.stringify(answer.headers)).not.toContain('cron');
   });
 });
 
@@ -310,22 +360,21 @@ function sendZeros(
 
 const halfOf = (bytes: Buffer): Buffer => bytes.subarray(0, Math.floor(bytes.length / 2));
 const noisePng = (): Promise<Buffer> =>
-  sharp(randomBytes(64 * 64 * 3), { raw: { width: 64, height: 64, channels: 3 } }).png().toBuffer();
+  sharp(randomBytes(64 * 64 * 3), { raw: { width: 64, height: 64, channels: 3 } })
+    .png()
+    .toBuffer();
 
-function textBombs(): Buffer[] {
-  const packed = deflateSync(Buffer.alloc(50 * 1024 * 1024), { level: 9 });
-  return [1, 2, 3, 4].map((n) => chunk('zTXt', Buffer.concat([Buffer.from(`Comment${n}\0\0`), packed])));
-}
+/** Fifty megabytes of text in fifty kilobytes. */
+const textBomb = (): Buffer =>
+  chunk(
+    'zTXt',
+    Buffer.concat([Buffer.from('Comment\0\0'), deflateSync(Buffer.alloc(50 * 1024 * 1024), { level: 9 })]),
+  );
 
 /** What runs when the document is opened. */
 function openAction(pdf: PDFKit.PDFDocument, kind: 'JavaScript' | 'Launch'): void {
-  const action = pdf.ref(
-    kind === 'JavaScript'
-      ? { Type: 'Action', S: 'JavaScript', JS: new String('app.alert(1)') }
-      : { Type: 'Action', S: 'Launch', F: new String('a.exe') },
-  );
-  action.end('');
-  Object.assign(pdf._root.data as object, { OpenAction: action });
+  const words = kind === 'JavaScript' ? { JS: new String('app.alert(1)') } : { F: new String('a.exe') };
+  pdf.ref({ Type: 'Action', S: kind, ...words }).end('');
 }
 
 /** An object stream: the dictionary with the script is deflated, so that its name stands nowhere in the bytes. */

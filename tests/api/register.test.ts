@@ -189,7 +189,11 @@ describe('a record', () => {
       'fittings.0.sizeMm',
     ],
     ['a day that is none', { madeOn: '2025-02-29' }, 'madeOn'],
-    ['a width of nothing', { fittings: [{ position: 'lower', type: 'hook', throatMm: 1e-9, detachable: true }] }, 'fittings.0.throatMm'],
+    [
+      'a width of nothing',
+      { fittings: [{ position: 'lower', type: 'hook', throatMm: 1e-9, detachable: true }] },
+      'fittings.0.throatMm',
+    ],
     ['a year that is none', { madeOn: '0000-01-01' }, 'madeOn'],
     ['made after it was received', { madeOn: day(-1), receivedOn: day(-5) }, 'madeOn'],
     ['a hire without its owner', { owner: { kind: 'hired' } }, 'owner.name'],

@@ -54,10 +54,12 @@ export interface LaunchOptions {
   video?: string;
   /** `none`: the machine has no camera at all. */
   camera?: 'fake' | 'none';
+  /** A host name that leads to this machine, as a store's own name does. */
+  resolveHere?: string;
 }
 
 /** Debian's Chromium. Whether a page may use the camera is the window's affair (`openWindow`). */
-export function launchBrowser({ video, camera = 'fake' }: LaunchOptions = {}): Promise<Browser> {
+export function launchBrowser({ video, camera = 'fake', resolveHere }: LaunchOptions = {}): Promise<Browser> {
   return chromium.launch({
     executablePath: '/usr/bin/chromium',
     args: [
@@ -65,6 +67,7 @@ export function launchBrowser({ video, camera = 'fake' }: LaunchOptions = {}): P
       '--disable-quic',
       '--disable-background-networking',
       ...(camera === 'fake' ? ['--use-fake-device-for-media-stream'] : []),
+      ...(resolveHere ? [`--host-resolver-rules=MAP ${resolveHere} 127.0.0.1`] : []),
       ...(video ? [`--use-file-for-fake-video-capture=${video}`] : []),
     ],
   });
@@ -101,22 +104,31 @@ export async function openWindow(
   context.setDefaultTimeout(15_000);
   const page = await context.newPage();
   watchForErrors(page, account ?? 'guest');
-  if (account) await signIn(context, account);
+  if (account) await signIn(page, account);
   return { context, page };
 }
 
-/** Through the API, so that only the test of the sign-in page pays for that page. */
-async function signIn(context: BrowserContext, account: string): Promise<void> {
-  const answer = await context.request.post('/api/session', {
-    data: { email: `${account}@${DEMO_DOMAIN}`, password: DEMO_PASSWORD },
-  });
-  if (!answer.ok()) throw new Error(`${account} cannot sign in: ${await answer.text()}`);
+/** From a page by the API, so that only the test of the sign-in page pays for that page. */
+async function signIn(page: Page, account: string): Promise<void> {
+  await page.goto('/favicon.svg');
+  const status = await page.evaluate(
+    async (body) => {
+      const headers = { 'Content-Type': 'application/json' };
+      return (await fetch('/api/session', { method: 'POST', headers, body })).status;
+    },
+    JSON.stringify({ email: `${account}@${DEMO_DOMAIN}`, password: DEMO_PASSWORD }),
+  );
+  if (status !== 200) throw new Error(`${account} cannot sign in: ${status}`);
 }
 
 const pageErrors: string[] = [];
 
-/** The API refuses things as part of its work, and the page shows that in words; Chromium logs it all the same. */
-const REFUSAL = /^Failed to load resource: the server responded with a status of 4\d\d/;
+const HARMLESS = [
+  // The API refuses things as part of its work, and the page shows that in words; Chromium logs it all the same
+  /^Failed to load resource: the server responded with a status of 4\d\d/,
+  // Over plain http from another machine
+  /^The Cross-Origin-Opener-Policy header has been ignored/,
+];
 
 function watchForErrors(page: Page, who: string): void {
   const note = (what: string): void =>
@@ -124,12 +136,18 @@ function watchForErrors(page: Page, who: string): void {
   page.on('pageerror', (error) => note(`uncaught ${String(error)}`));
   // A breach of the content security policy comes as a console error, too
   page.on('console', (message) => {
-    if (message.type() === 'error' && !REFUSAL.test(message.text())) note(`console: ${message.text()}`);
+    if (message.type() === 'error' && !HARMLESS.some((each) => each.test(message.text())))
+      note(`console: ${message.text()}`);
   });
   page.on('response', (response) => {
     const isRefusal = response.status() < 500 && new URL(response.url()).pathname.startsWith('/api/');
     if (response.status() >= 400 && !isRefusal) note(`${response.status()} for ${response.url()}`);
   });
+}
+
+/** Cameras and pages of a test that is over would go on taking the machine's time. */
+export async function closeWindows(...browsers: Browser[]): Promise<void> {
+  await Promise.all(browsers.flatMap((browser) => browser.contexts()).map((context) => context.close()));
 }
 
 /** What went wrong in any window since the last call: uncaught errors, console errors, files that were not served. */

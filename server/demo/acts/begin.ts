@@ -5,6 +5,8 @@ import { drawTags, printLabels, type DrawnTag } from '../../commands/printLabels
 import { registerSling } from '../../commands/registerSling';
 import { performAction } from '../../commands/actions/performAction';
 import type { ActorContext } from '../../context';
+import { Fitting } from '../../models/Fitting';
+import { presentFitting } from '../../queries/slingDetail';
 import type { DemoSling } from '../plan/fleet';
 import { buildSlingRequest } from './slingRequest';
 import { getTrace, type World } from './world';
@@ -15,7 +17,16 @@ const THIN_STOCK = 'roll-300-round';
 export async function register(context: ActorContext, world: World, sling: DemoSling): Promise<void> {
   const request = buildSlingRequest(sling, world.clock, world.places[sling.lot.site]);
   const { id } = await registerSling(context, request);
-  world.records.set(sling, { id, identity: request.makerSerial ?? request.number, code: null });
+  const fittings =
+    request.fittings.length === 0
+      ? []
+      : await Fitting.findAll({ where: { slingId: id }, transaction: context.transaction });
+  world.records.set(sling, {
+    id,
+    identity: request.makerSerial ?? request.number,
+    code: null,
+    fittings: fittings.map(presentFitting),
+  });
 }
 
 /** One run of labels for all of them. */

@@ -6,10 +6,8 @@ import {
 import type { Answer } from '../../../shared/domain/inspection/criterion';
 import { inspectSling } from '../../commands/inspectSling';
 import type { ActorContext } from '../../context';
-import { Fitting } from '../../models/Fitting';
-import { presentFitting } from '../../queries/slingDetail';
 import type { DemoSling } from '../plan/fleet';
-import { getTrace, type World } from './world';
+import { getTrace, type SlingTrace, type World } from './world';
 
 /** The one thing that the inspector found. */
 export interface Seen {
@@ -26,12 +24,12 @@ export async function inspect(
   type: InspectionType,
   seen: Seen | null = null,
 ): Promise<void> {
-  const { id } = getTrace(world, sling);
+  const trace = getTrace(world, sling);
   const { isComplete } = INSPECTION_TYPE_FACTS[type];
   const found = seen ? [answerSeen(seen)] : [];
-  const clean = isComplete ? await listClean(context, id, sling, seen?.criterionId) : [];
+  const clean = isComplete ? listClean(trace, sling, seen?.criterionId) : [];
   const answers = [...found, ...clean];
-  await inspectSling(context, id, { type, answers: answers.map(toSent), restClean: !isComplete }, null);
+  await inspectSling(context, trace.id, { type, answers: answers.map(toSent), restClean: !isComplete }, null);
 }
 
 const answerSeen = ({ criterionId, note, photoId }: Seen): Answer => ({
@@ -46,15 +44,8 @@ const toSent = ({ photoIds, ...answer }: Answer): Omit<Answer, 'photoIds'> & { p
   ...(photoIds ? { photoIds: [...photoIds] } : {}),
 });
 
-async function listClean(
-  { transaction }: ActorContext,
-  slingId: number,
-  { lot: { model } }: DemoSling,
-  seenId: string | undefined,
-): Promise<Answer[]> {
-  const fittings =
-    model.fittings.length === 0 ? [] : await Fitting.findAll({ where: { slingId }, transaction });
-  return criteriaFor({ ...model, fittings: fittings.map(presentFitting) })
+function listClean({ fittings }: SlingTrace, { lot: { model } }: DemoSling, seenId?: string): Answer[] {
+  return criteriaFor({ ...model, fittings })
     .filter((row) => row.id !== seenId)
     .map((row) => row.clean);
 }

@@ -6,7 +6,6 @@ import { performAction } from '../../commands/actions/performAction';
 import { getTagCode } from '../../commands/handleTags';
 import { reportDamage } from '../../commands/reportDamage';
 import type { ActorContext } from '../../context';
-import { Fitting } from '../../models/Fitting';
 import { HoldReasonRow } from '../../models/HoldReasonRow';
 import { DEMO_PASSWORD } from '../people';
 import type { Cause } from '../plan/causes';
@@ -82,15 +81,11 @@ export async function release(
 }
 
 export async function destroy(context: ActorContext, world: World, sling: DemoSling): Promise<void> {
-  const fittings = await Fitting.findAll({
-    where: { slingId: getTrace(world, sling).id },
-    transaction: context.transaction,
-  });
   const { isSynthetic } = KIND_FACTS[sling.lot.model.kind];
   await act(context, world, sling, 'destroy', {
     method: DESTROY_METHODS[0],
     photoIds: [getPicture(world, isSynthetic ? 'destroyedTextile' : 'destroyedMetal')],
-    fittings: fittings.map(({ id }) => ({ fittingId: id, fate: 'destroyed' })),
+    fittings: getTrace(world, sling).fittings.map(({ id }) => ({ fittingId: id, fate: 'destroyed' })),
     password: DEMO_PASSWORD,
   });
 }

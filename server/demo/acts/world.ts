@@ -1,4 +1,5 @@
 import type { Transaction } from 'sequelize';
+import type { Fitting } from '../../../shared/domain/slings/spec';
 import type { SessionUser } from '../../../shared/schemas/people';
 import type { ActorContext, Services } from '../../context';
 import type { DemoClock } from '../clock';
@@ -25,7 +26,7 @@ export interface World extends Omit<Services, 'now'> {
   places: Record<DemoSite, SitePlaces>;
   evaluators: Record<keyof typeof EVALUATORS, number>;
   pictures: ReadonlyMap<PictureName, string>;
-  /** The record of a sling once it is registered, and its last label's code. */
+  /** What is known of a sling once it is registered. */
   records: Map<DemoSling, SlingTrace>;
 }
 
@@ -33,7 +34,9 @@ export interface SlingTrace {
   id: number;
   /** Serial or number, as it stands on the sling. */
   identity: string;
+  /** Of its last label. */
   code: string | null;
+  fittings: readonly Fitting[];
 }
 
 /** One thing that one person did at one moment. */

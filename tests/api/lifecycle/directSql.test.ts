@@ -1,8 +1,6 @@
-import { createHash } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Sling } from '../../../shared/schemas/slings';
-import { expectStatus } from '../../support/work';
-import { verifyLedger } from './calls';
+import { insertLedger, readRow, type Account, type Forged } from './forging';
 import { openScenes, type Scenes } from './scenes';
 
 let scenes: Scenes;
@@ -24,7 +22,6 @@ beforeAll(async () => {
 });
 afterAll(() => scenes.close());
 
-type Account = 'appQuery' | 'adminQuery';
 const ACCOUNTS: Account[] = ['appQuery', 'adminQuery'];
 /** The triggers' own refusal, or a right that the account does not have. */
 const REFUSED = /45000|denied/;
@@ -32,9 +29,6 @@ const REFUSED = /45000|denied/;
 async function expectRefused(account: Account, sql: string, values: unknown[] = []): Promise<void> {
   await expect(scenes.store.database[account](sql, values), `${account}: ${sql}`).rejects.toThrow(REFUSED);
 }
-
-const rowOf = async (sling: Pick<Sling, 'id'>): Promise<Record<string, unknown>> =>
-  (await scenes.store.database.adminQuery('SELECT * FROM slings WHERE id = ?', [sling.id]))[0] ?? {};
 
 describe.each(ACCOUNTS)('with %s, the sling’s row', (account) => {
   it.each([
@@ -56,13 +50,13 @@ describe.each(ACCOUNTS)('with %s, the sling’s row', (account) => {
   ])('is not moved by SET %s', async (assignment) => {
     // Whatever the statement is, one of these would change by it.
     const slings = [received, held, condemned, rejected];
-    const before = await Promise.all(slings.map(rowOf));
+    const before = await Promise.all(slings.map((sling) => readRow(scenes.store, sling)));
     const tries = await Promise.allSettled(
       slings.map((sling) =>
         scenes.store.database[account](`UPDATE slings SET ${assignment} WHERE id = ${sling.id}`),
       ),
     );
-    expect(await Promise.all(slings.map(rowOf))).toEqual(before);
+    expect(await Promise.all(slings.map((sling) => readRow(scenes.store, sling)))).toEqual(before);
     const errors = tries.flatMap((one) => (one.status === 'rejected' ? [String(one.reason)] : []));
     expect(errors.length).toBeGreaterThan(0);
     for (const error of errors) expect(error).toMatch(REFUSED);
@@ -87,37 +81,6 @@ describe.each(ACCOUNTS)('with %s, the sling’s row', (account) => {
     await expectRefused(account, insert({ ...fresh, state: "'received'", last_in_service_seq: '1' }));
   });
 });
-
-interface Forged {
-  type: string;
-  to: string;
-  from?: string;
-  seq?: number;
-  prevHash?: string;
-  condemned?: boolean;
-}
-
-/** A ledger row as a forger would write it: all columns right but for what is forged. */
-async function insertLedger(account: Account, sling: Sling, forged: Forged): Promise<void> {
-  const now = await rowOf(sling);
-  await scenes.store.database[account](
-    `INSERT INTO ledger (sling_id, sling_seq, type, at, actor_id, actor_name, from_state, to_state, condemned,
-       custody_kind, custody_location_id, data, prev_hash, hash)
-     VALUES (?, ?, ?, UTC_TIMESTAMP(3), NULL, 'Nobody', ?, ?, ?, ?, ?, '{}', ?, ?)`,
-    [
-      sling.id,
-      forged.seq ?? Number(now.ledger_count) + 1,
-      forged.type,
-      forged.from ?? String(now.state),
-      forged.to,
-      forged.condemned ?? Boolean(now.condemned),
-      now.custody_kind,
-      now.custody_location_id,
-      forged.prevHash ?? String(now.head_hash),
-      createHash('sha256').update(JSON.stringify(forged)).digest('hex'),
-    ],
-  );
-}
 
 describe.each(ACCOUNTS)('with %s, a ledger row', (account) => {
   const refusedRows: [string, () => Sling, Forged, RegExp][] = [
@@ -175,17 +138,17 @@ describe.each(ACCOUNTS)('with %s, a ledger row', (account) => {
   ];
 
   it.each(refusedRows)('is refused when it %s', async (_what, sling, forged, message) => {
-    await expect(insertLedger(account, sling(), forged)).rejects.toThrow(message);
-    const now = await rowOf(sling());
+    await expect(insertLedger(scenes.store, account, sling(), forged)).rejects.toThrow(message);
+    const now = await readRow(scenes.store, sling());
     expect([now.ledger_count, now.state]).toEqual([sling().version, sling().state]);
   });
 
   it('is refused when no complete inspection has passed', async () => {
     const labelled = await scenes.work.register();
     await scenes.work.confirm(labelled, await scenes.work.label(labelled));
-    await expect(insertLedger(account, labelled, { type: 'accept', to: 'in_service' })).rejects.toThrow(
-      /No complete inspection/,
-    );
+    await expect(
+      insertLedger(scenes.store, account, labelled, { type: 'accept', to: 'in_service' }),
+    ).rejects.toThrow(/No complete inspection/);
   });
 
   it('is never changed and never deleted', async () => {
@@ -267,109 +230,5 @@ describe('the working account', () => {
     'SELECT * FROM mysql.global_priv',
   ])('may not %s', async (sql) => {
     await expect(scenes.store.database.appQuery(sql)).rejects.toThrow(/denied/);
-  });
-});
-
-describe('a forger who may drop triggers', () => {
-  /** As somebody with every right and a grudge would do it. */
-  async function forge(sql: string): Promise<void> {
-    const { adminQuery } = scenes.store.database;
-    const names = ['ledger_rows_stay', 'ledger_rows_are_kept', 'slings_move_by_ledger'];
-    const bodies = new Map<string, string>();
-    for (const name of names) {
-      const [shown] = await adminQuery(`SHOW CREATE TRIGGER ${name}`);
-      bodies.set(name, String(shown?.['SQL Original Statement']));
-      await adminQuery(`DROP TRIGGER ${name}`);
-    }
-    try {
-      await adminQuery(sql);
-    } finally {
-      for (const body of bodies.values()) await adminQuery(body);
-    }
-  }
-  const fresh = async (): Promise<Sling> => {
-    const sling = await scenes.held();
-    expect(await verifyLedger(scenes.store, sling.id)).toMatchObject({
-      ok: true,
-      rows: sling.version,
-      slings: 1,
-    });
-    return sling;
-  };
-
-  it.each([
-    "actor_name = 'Somebody else'",
-    'actor_id = NULL',
-    'at = at - INTERVAL 1 SECOND',
-    "type = 'moved'",
-    "to_state = 'held'",
-    "from_state = 'held'",
-    'condemned = 1',
-    "custody_kind = 'cage'",
-    'custody_location_id = 1',
-    `data = '{"verdict":"pass"}'`,
-    "data = 'no JSON at all'",
-    "prev_hash = REPEAT('1', 64)",
-    "hash = REPEAT('1', 64)",
-  ])('is found and named when a row’s %s', async (assignment) => {
-    const sling = await fresh();
-    await forge(`UPDATE ledger SET ${assignment} WHERE sling_id = ${sling.id} AND sling_seq = 3`);
-    const found = await verifyLedger(scenes.store, sling.id);
-    expect(found.ok).toBe(false);
-    expect(found.firstBad).toMatchObject({ slingId: sling.id });
-    // A changed hash is seen at the row itself.
-    expect(found.firstBad?.slingSeq).toBe(3);
-    expect(found.firstBad?.message).toMatch(/Row 3/);
-    // The check of everything names it as well.
-    expect((await verifyLedger(scenes.store)).ok).toBe(false);
-  });
-
-  it('is found and named when a row is taken out, the first, one between or the last', async () => {
-    for (const which of ['first', 'middle', 'last'] as const) {
-      const sling = await fresh();
-      const seq = { first: 1, middle: 3, last: sling.version }[which];
-      await forge(`DELETE FROM ledger WHERE sling_id = ${sling.id} AND sling_seq = ${seq}`);
-      const found = await verifyLedger(scenes.store, sling.id);
-      expect([which, found.ok, found.firstBad?.slingId, found.firstBad?.slingSeq]).toEqual([
-        which,
-        false,
-        sling.id,
-        seq,
-      ]);
-    }
-  });
-
-  it('is found when the head is set back with the last row', async () => {
-    const sling = await fresh();
-    await forge(`DELETE FROM ledger WHERE sling_id = ${sling.id} AND sling_seq = ${sling.version}`);
-    await forge(`UPDATE slings SET ledger_count = ledger_count - 1 WHERE id = ${sling.id}`);
-    expect((await verifyLedger(scenes.store, sling.id)).firstBad?.slingId).toBe(sling.id);
-  });
-
-  it('is found when two rows change places', async () => {
-    const sling = await fresh();
-    await forge(`UPDATE ledger SET sling_seq = 900 WHERE sling_id = ${sling.id} AND sling_seq = 2;
-      UPDATE ledger SET sling_seq = 2 WHERE sling_id = ${sling.id} AND sling_seq = 3;
-      UPDATE ledger SET sling_seq = 3 WHERE sling_id = ${sling.id} AND sling_seq = 900`);
-    expect((await verifyLedger(scenes.store, sling.id)).firstBad).toMatchObject({
-      slingId: sling.id,
-      slingSeq: 2,
-    });
-  });
-
-  it('is found when a row was put in with a hash that is not its own', async () => {
-    const sling = await fresh();
-    // The database cannot compute the canonical form: it lets a well-placed row in, and the check names it.
-    await insertLedger('adminQuery', sling, { type: 'secure', to: 'held' });
-    expect((await verifyLedger(scenes.store, sling.id)).firstBad).toMatchObject({
-      slingId: sling.id,
-      slingSeq: sling.version + 1,
-    });
-  });
-
-  it('leaves the guards as they were', async () => {
-    await expectRefused('adminQuery', `UPDATE slings SET state = 'in_service' WHERE id = ${held.id}`);
-    await expectRefused('adminQuery', `DELETE FROM ledger WHERE sling_id = ${held.id}`);
-    expectStatus(await (await scenes.store.signIn('storekeeper')).get(`/api/slings/${held.id}`), 200);
   });
 });

@@ -43,7 +43,7 @@ export async function see(page: Page, words: string | RegExp): Promise<Locator> 
 }
 
 /** Sends a photo as from the gallery, and waits until it stands in the form. */
-export async function addPhoto(page: Page, file: string): Promise<void> {
+export async function addPhoto(page: Page, file: Parameters<Locator['setInputFiles']>[0]): Promise<void> {
   await page.getByLabel('From the gallery').setInputFiles(file);
   await page.getByAltText('Photo 1', { exact: true }).waitFor();
 }

@@ -5,27 +5,16 @@ import {
   useInfiniteQuery,
   useQuery,
 } from '@tanstack/react-query';
-import { slingsPage, type SlingsQuery, type SlingSummary } from '../../../../shared/schemas/slings';
+import { slingsPage, type SlingSummary } from '../../../../shared/schemas/slings';
 import { api } from '../../../lib/apiClient';
+import { toSlingSearch, type SlingFilters } from './slingFilters';
 import { slingKeys } from './slingKeys';
 
-export type SlingFilters = Partial<Omit<SlingsQuery, 'limit' | 'cursor' | 'siteId'>> & {
-  siteId?: number | undefined;
-};
 type Page = { items: SlingSummary[]; nextCursor: string | null };
 
 const PAGE_ROWS = 50;
 /** A number on the home page needs no more: beyond it "more than" says enough. */
 const COUNT_ROWS = 100;
-
-/** The filters as they stand in an address or a request; what isn't set is left out. */
-export function toSlingSearch(filters: SlingFilters): string {
-  const search = new URLSearchParams();
-  for (const [name, value] of Object.entries(filters)) {
-    if (value !== undefined && value !== '') search.set(name, String(value));
-  }
-  return search.toString();
-}
 
 function fetchSlings(
   filters: SlingFilters,

@@ -1,4 +1,4 @@
-import type { SlingFilters } from './findSlings';
+import type { SlingFilters } from './slingFilters';
 
 /** Query keys of everything about slings; invalidate `all` after an act. */
 export const slingKeys = {

@@ -1,7 +1,7 @@
 import { KIND_FACTS } from '../../../../shared/domain/slings/kinds';
 import { REASON_FACTS } from '../../../../shared/domain/lifecycle/reasons';
 import type { SlingSummary } from '../../../../shared/schemas/slings';
-import type { SlingFilters } from '../api/findSlings';
+import type { SlingFilters } from '../api/slingFilters';
 
 export interface BoardSection {
   id: string;

@@ -1,5 +1,5 @@
 import type { Role } from '../../../../shared/domain/access/roles';
-import type { SlingFilters } from '../api/findSlings';
+import type { SlingFilters } from '../api/slingFilters';
 
 export interface Waiting {
   id: string;

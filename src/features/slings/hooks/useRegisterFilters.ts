@@ -1,7 +1,7 @@
 import { useMemo } from 'react';
 import { useSearchParams } from 'react-router-dom';
 import { slingsQuery } from '../../../../shared/schemas/slings';
-import type { SlingFilters } from '../api/findSlings';
+import type { SlingFilters } from '../api/slingFilters';
 
 const FILTER_NAMES = [
   'q',

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { slingsQuery } from '../../../../shared/schemas/slings';
-import { toSlingSearch } from '../../../../src/features/slings/api/findSlings';
+import { toSlingSearch } from '../../../../src/features/slings/api/slingFilters';
 import { BOARD_SECTIONS } from '../../../../src/features/slings/board/sections';
 import { WAITING } from '../../../../src/features/slings/home/waiting';
 import { parseFilters } from '../../../../src/features/slings/hooks/useRegisterFilters';

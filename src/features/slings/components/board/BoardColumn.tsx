@@ -4,7 +4,8 @@ import { Button } from '../../../../components/ui/Button';
 import { ErrorState, Skeleton } from '../../../../components/ui/states';
 import { paths } from '../../../../config/paths';
 import { formatAge } from '../../../../lib/format';
-import { toSlingSearch, useSlings } from '../../api/findSlings';
+import { useSlings } from '../../api/findSlings';
+import { toSlingSearch } from '../../api/slingFilters';
 import type { BoardSection } from '../../board/sections';
 import { BoardCard } from './BoardCard';
 

@@ -3,7 +3,8 @@ import { Link } from 'react-router-dom';
 import { Skeleton } from '../../../../components/ui/states';
 import { paths } from '../../../../config/paths';
 import { cx } from '../../../../lib/cx';
-import { toSlingSearch, useSlingCount } from '../../api/findSlings';
+import { useSlingCount } from '../../api/findSlings';
+import { toSlingSearch } from '../../api/slingFilters';
 import type { Waiting } from '../../home/waiting';
 
 /** How many wait, and what to do: the whole tile leads to the list behind the number. */
