@@ -1,6 +1,7 @@
 import type { Request, RequestHandler } from 'express';
 import { ipKeyGenerator, rateLimit, type Options } from 'express-rate-limit';
 import { slowDown } from 'express-slow-down';
+import { parseTagCode } from '../../shared/domain/tags/tagCode';
 import { AppError } from '../errors';
 import type { LimitName } from '../routing/route';
 import { findUser } from './authenticate';
@@ -13,6 +14,12 @@ const accountOf = (request: Request): string => {
   const email = typeof body === 'object' && body !== null && 'email' in body ? body.email : '';
   const account = typeof email === 'string' ? email.trim().toLowerCase().slice(0, 254) : '';
   return `${addressOf(request)}|${account}`;
+};
+/** One label is one, however its code is written. */
+const codeOf = (request: Request): string => {
+  const written = String(request.params.code);
+  const parsed = parseTagCode(written);
+  return `code:${parsed.ok ? parsed.code : written.slice(0, 20)}`;
 };
 const personOf = (request: Request): string => {
   const user = findUser(request);
@@ -84,7 +91,7 @@ export function createLimits(): { general: RequestHandler; named: Record<LimitNa
         rateLimit({
           windowMs: 15 * MINUTE,
           limit: 10,
-          keyGenerator: (request) => `code:${String(request.params.code).toUpperCase().slice(0, 20)}`,
+          keyGenerator: codeOf,
           ...refuseWith('This label was reported several times already. Tell the store directly.'),
         }),
       ],

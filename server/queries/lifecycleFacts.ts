@@ -7,6 +7,7 @@ import { Inspection } from '../models/Inspection';
 import { ShipmentLine } from '../models/ShipmentLine';
 import type { SlingRecord } from '../models/SlingRecord';
 import { Tag } from '../models/Tag';
+import { presentRatedLoads } from './slingSummary';
 
 /** Kind and spec belong together by the schema that let the record in; the database keeps them as two columns. */
 export function kindAndSpecOf(sling: SlingRecord): KindAndSpec {
@@ -50,7 +51,7 @@ export function toFacts(sling: SlingRecord, parts: SlingParts): LifecycleFacts {
     condemnedBy: sling.condemnedBy,
     ownerKind: sling.ownerKind,
     makersTag: sling.makersTag,
-    verticalKg: Number(sling.verticalKg),
+    ratedLoads: presentRatedLoads(sling),
     hasLiveLabel: parts.liveTag !== null,
     certificates: parts.certificates.map((held) => ({
       basis: held.basis,
@@ -91,7 +92,7 @@ function toEvaluation(line: ShipmentLine): EvaluationFact {
     hasReport: line.reportFileId !== null,
     repairer: line.repairer,
     proofLoadKg: line.proofLoadKg === null ? null : Number(line.proofLoadKg),
-    verticalKg: line.verticalKg === null ? null : Number(line.verticalKg),
+    ratedLoads: line.ratedLoads,
     hasDestructionCertificate: line.outcome === 'destroyed' && line.reportFileId !== null,
   };
 }

@@ -22,7 +22,17 @@ export async function readJsonBody(request: Request, response: Response): Promis
       else resolve();
     });
   });
-  return (request.body as unknown) ?? {};
+  const body = (request.body as unknown) ?? {};
+  if (isTooDeep(body)) throw new AppError('malformed', 'The body is nested too deeply.');
+  return body;
+}
+
+/** Far deeper than any body that is asked for: what walks it later must not run out of stack. */
+const MOST_NESTING = 32;
+
+function isTooDeep(value: unknown, left = MOST_NESTING): boolean {
+  if (typeof value !== 'object' || value === null) return false;
+  return left === 0 || Object.values(value).some((inner) => isTooDeep(inner, left - 1));
 }
 
 function asAppError(error: unknown): Error {

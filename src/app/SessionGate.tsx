@@ -24,9 +24,10 @@ export function SessionProvider(): ReactNode {
       user: user ?? null,
       signOut: async () => {
         await api.send('DELETE', '/session', undefined, noContent);
-        // What one person saw must not flash up for the next
-        client.clear();
+        // Through the query that is on the screen: one that `clear()` took away would tell nobody
         client.setQueryData(sessionQuery.queryKey, null);
+        // What one person saw must not flash up for the next
+        client.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== sessionQuery.queryKey[0] });
       },
       refresh: async () => {
         await client.invalidateQueries({ queryKey: sessionQuery.queryKey });

@@ -1,8 +1,7 @@
 import { randomBytes } from 'node:crypto';
 import { gzipSync } from 'node:zlib';
-import type { Express } from 'express';
 import type TestAgent from 'supertest/lib/agent';
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { ROUTE_ACCESS, type RouteKey } from '../../shared/domain/access/routes';
 import { SLING_ACTIONS } from '../../shared/domain/lifecycle/actions';
 import { SLING_KINDS } from '../../shared/domain/slings/kinds';
@@ -22,10 +21,15 @@ import { expectStatus, openWork, type Work } from '../support/work';
 
 let store: TestStore;
 let work: Work;
-let app: Express;
 /** Somebody with every role, so that nothing but the input stands in the way. */
 let agent: TestAgent;
+let email = '';
 const params: Record<string, string> = {};
+
+/** A server whose limits on repeated calls have counted nothing yet. */
+async function startAnew(): Promise<void> {
+  agent = await signInTo(openSecondApp(store, { trustProxy: 1 }), email, PERSON_PASSWORD);
+}
 
 beforeAll(async () => {
   store = await openTestStore();
@@ -42,8 +46,8 @@ beforeAll(async () => {
       },
     ],
   });
-  app = openSecondApp(store, { trustProxy: 1 });
-  agent = await signInTo(app, person.email, PERSON_PASSWORD);
+  email = person.email;
+  await startAnew();
   const sling = await work.register();
   await work.act('storekeeper', sling, 'hold', { reasons: [{ code: 'latch' }] });
   await work.act('storekeeper', sling, 'secure', { locationId: work.cageId });
@@ -101,8 +105,7 @@ function send(target: string, type: string, body: string | Buffer, headers: Reco
 const JSON_TYPE = 'application/json';
 const deep = `${'['.repeat(100_000)}${']'.repeat(100_000)}`;
 const deepObject = `${'{"a":'.repeat(60_000)}1${'}'.repeat(60_000)}`;
-const GARBAGE = [
-  undefined,
+const GARBAGE: unknown[] = [
   null,
   true,
   1.5,
@@ -134,7 +137,7 @@ const CASES: [string, number[], string, string | Buffer][] = [
   ['a list', [400], JSON_TYPE, '[1, 2, 3]'],
   ['bytes that are no text', [400], JSON_TYPE, Buffer.concat([Buffer.from('{"a":"'), randomBytes(64)])],
   ['lists nested a hundred thousand deep', [400], JSON_TYPE, deep],
-  ['objects nested sixty thousand deep', [400, 422], JSON_TYPE, deepObject],
+  ['objects nested sixty thousand deep', [400], JSON_TYPE, deepObject],
   [
     'keys of the prototype',
     [400, 422],
@@ -164,6 +167,8 @@ const isRight = (target: string, status: number): boolean =>
   status < 300 && /\/(link|send|destroyed|account)$/.test(target);
 
 describe('every write', () => {
+  beforeEach(startAnew);
+
   it.each(CASES)('refuses %s in words, and writes nothing', async (_, statuses, type, body) => {
     const before = await countRows(store);
     const wrong: string[] = [];
@@ -223,8 +228,7 @@ describe('a field', () => {
   it('that nobody knows does not come in by the side, however deep', async () => {
     const body = `${JSON.stringify(base()).slice(0, -1)},"extra":${deepObject}}`;
     const answer = await send('POST /api/slings', JSON_TYPE, body, { 'Idempotency-Key': 'deep-1' });
-    if (answer.status === 201) expect(answer.text).not.toContain('extra');
-    else expectProblem(answer, answer.status);
+    expectProblem(answer, 400, 'malformed');
   });
 
   it('with the prototype’s name among units is not kept', async () => {

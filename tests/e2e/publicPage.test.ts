@@ -1,6 +1,8 @@
+import { randomBytes } from 'node:crypto';
 import type { Browser } from 'playwright-core';
 import sharp from 'sharp';
 import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
+import { drawTagCode } from '../../shared/domain/tags/tagCode';
 import type { Sling } from '../../shared/schemas/slings';
 import {
   closeWindows,
@@ -75,10 +77,14 @@ describe('the page behind a label', () => {
     expect(held.photos.length, 'the report’s photo is not on the record').toBe(sling.photos.length + 1);
   });
 
-  it('says DO NOT USE for a code that was never given', async () => {
+  it('says DO NOT USE for a code that was never given, and for one with a wrong character', async () => {
     const { page } = await openWindow(browser, served.origin);
-    await page.goto('/t/0000000000');
+    const ungiven = drawTagCode(randomBytes);
+    await page.goto(`/t/${ungiven}`);
     await see(page, 'DO NOT USE');
     await see(page, 'This label is not known here.');
+    await page.goto(`/t/${ungiven.slice(0, 9)}${ungiven.endsWith('A') ? 'B' : 'A'}`);
+    await see(page, 'DO NOT USE');
+    await see(page, 'a character is wrong');
   });
 });

@@ -61,7 +61,7 @@ const mesh = (extra: string): string => {
   const spirals = Array.from(
     { length: 16 },
     (_, row) =>
-      `<path d="M40 ${120 + row * 23} ${Array.from({ length: 24 }, (_step, step) => `l15 ${step % 2 === 0 ? 18 : -18}`).join(' ')}" fill="none" stroke="#5d6367" stroke-width="6"/>`,
+      `<path d="M40 ${120 + row * 23} ${Array.from({ length: 48 }, (_step, step) => `l15 ${step % 2 === 0 ? 18 : -18}`).join(' ')}" fill="none" stroke="#5d6367" stroke-width="6"/>`,
   );
   return frame(spirals.join('') + extra);
 };

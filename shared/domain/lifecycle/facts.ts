@@ -1,6 +1,6 @@
 import type { Role } from '../access/roles';
 import type { CertificateBasis, MakersTag } from '../slings/kinds';
-import type { KindAndSpec } from '../slings/spec';
+import type { KindAndSpec, RatedLoads } from '../slings/spec';
 import type { HoldReason } from './reasons';
 import type { CustodyKind, SlingState } from './states';
 
@@ -43,8 +43,8 @@ export interface EvaluationFact {
   hasReport: boolean;
   repairer: string | null;
   proofLoadKg: number | null;
-  /** Rated load that the evaluator gives, when it is not the old one. */
-  verticalKg: number | null;
+  /** Rated loads that the evaluator gives, when they are not the old ones. */
+  ratedLoads: RatedLoads | null;
   hasDestructionCertificate: boolean;
 }
 
@@ -56,7 +56,7 @@ export interface LifecycleFacts {
   condemnedBy: number | null;
   ownerKind: 'own' | 'hired';
   makersTag: MakersTag;
-  verticalKg: number;
+  ratedLoads: RatedLoads;
   hasLiveLabel: boolean;
   certificates: readonly { basis: CertificateBasis; loadKg: number | null; seq: number }[];
   openReasons: readonly OpenReason[];

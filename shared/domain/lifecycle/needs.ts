@@ -1,6 +1,7 @@
 import { requiredProofLoadKg } from '../quarantine/proofLoad';
 import { needsCertificate } from '../slings/certificates';
 import { KIND_FACTS } from '../slings/kinds';
+import { compareRatedLoads } from '../slings/ratedLoads';
 import type { Actor, InspectionFact, LifecycleFacts, Unmet } from './facts';
 import { clearingOf, REASON_FACTS } from './reasons';
 
@@ -27,8 +28,8 @@ const liveLabel: Need = ({ hasLiveLabel }) =>
 const makersTag: Need = ({ makersTag: tag }) =>
   unless(tag === 'legible', 'makers_tag', `The maker’s tag is ${tag}.`);
 
-const ratedLoad: Need = ({ verticalKg }) =>
-  unless(verticalKg > 0, 'rated_load', 'No rated load is on record.');
+const ratedLoad: Need = ({ ratedLoads }) =>
+  unless(ratedLoads.verticalKg > 0, 'rated_load', 'No rated load is on record.');
 
 const certificate: Need = ({ sling, certificates }) =>
   unless(
@@ -116,9 +117,9 @@ const repairerNamed: Need = ({ evaluation }) =>
     'Who repaired it is not named.',
   );
 
-const proofTest: Need = ({ evaluation, sling, verticalKg }) => {
+const proofTest: Need = ({ evaluation, sling, ratedLoads }) => {
   if (evaluation?.outcome !== 'repaired') return null;
-  const required = requiredProofLoadKg(sling, verticalKg);
+  const required = requiredProofLoadKg(sling, ratedLoads.verticalKg);
   return unless(
     required !== null && evaluation.proofLoadKg !== null && evaluation.proofLoadKg >= required,
     'proof_test',
@@ -128,17 +129,17 @@ const proofTest: Need = ({ evaluation, sling, verticalKg }) => {
   );
 };
 
-/** The same rated load, or a lower one with a new maker's tag and certificate: never a higher one. */
+/** The same rated loads, or lower ones with a new maker's tag and certificate: never a higher one. */
 const ratedLoadAfterEvaluation: Need = ({
   evaluation,
-  verticalKg,
+  ratedLoads,
   certificates,
   lastSentSeq,
   makersTag: tag,
 }) => {
-  const given = evaluation?.verticalKg ?? null;
-  if (given === null || given === verticalKg) return null;
-  if (given > verticalKg) {
+  const change = evaluation?.ratedLoads ? compareRatedLoads(ratedLoads, evaluation.ratedLoads) : 'same';
+  if (change === 'same') return null;
+  if (change === 'higher') {
     return { rule: 'rated_load', message: 'The evaluator’s rated load is higher than the one on record.' };
   }
   const hasNewCertificate = certificates.some((held) => held.seq > (lastSentSeq ?? 0));

@@ -1,4 +1,9 @@
-import type { Actor, EvaluationFact, LifecycleFacts, OpenReason } from '../../../../shared/domain/lifecycle/facts';
+import type {
+  Actor,
+  EvaluationFact,
+  LifecycleFacts,
+  OpenReason,
+} from '../../../../shared/domain/lifecycle/facts';
 
 export const STOREKEEPER: Actor = { id: 1, roles: ['storekeeper'], designation: null };
 export const INSPECTOR: Actor = { id: 2, roles: ['inspector'], designation: { isQualified: true } };
@@ -16,7 +21,7 @@ export function received(changes: Partial<LifecycleFacts> = {}): LifecycleFacts 
     condemnedBy: null,
     ownerKind: 'own',
     makersTag: 'legible',
-    verticalKg: 3150,
+    ratedLoads: { verticalKg: 3150, chokerKg: 2520 },
     hasLiveLabel: true,
     certificates: [{ basis: 'assembly', loadKg: 6300, seq: 1 }],
     openReasons: [],
@@ -38,10 +43,22 @@ export function inspection(
   seq: number,
   changes: Partial<LifecycleFacts['inspections'][number]> = {},
 ): LifecycleFacts['inspections'][number] {
-  return { id: seq, type, inspectorId: INSPECTOR.id, seq, verdict: 'pass', isComplete: type !== 'frequent', ...changes };
+  return {
+    id: seq,
+    type,
+    inspectorId: INSPECTOR.id,
+    seq,
+    verdict: 'pass',
+    isComplete: type !== 'frequent',
+    ...changes,
+  };
 }
 
-export function reason(code: OpenReason['code'], placedSeq: number, changes: Partial<OpenReason> = {}): OpenReason {
+export function reason(
+  code: OpenReason['code'],
+  placedSeq: number,
+  changes: Partial<OpenReason> = {},
+): OpenReason {
   return { id: placedSeq, code, confirmed: false, placedBy: STOREKEEPER.id, placedSeq, ...changes };
 }
 

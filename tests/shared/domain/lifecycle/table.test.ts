@@ -107,7 +107,16 @@ describe('the lifecycle table', () => {
   it('has the fourteen actions and eight states of the design', () => {
     expect([...SLING_ACTIONS].sort()).toEqual(Object.keys(TABLE).sort());
     expect([...SLING_STATES].sort()).toEqual(
-      ['received', 'in_service', 'held', 'sent_for_evaluation', 'returned', 'destroyed', 'lost', 'departed'].sort(),
+      [
+        'received',
+        'in_service',
+        'held',
+        'sent_for_evaluation',
+        'returned',
+        'destroyed',
+        'lost',
+        'departed',
+      ].sort(),
     );
   });
 
@@ -186,7 +195,9 @@ describe('the transitions that the database keeps', () => {
   });
 
   it('lead into service by accept, release and return_to_service alone, and never for a condemned sling', () => {
-    const into = listLedgerTransitions().filter(({ from, to }) => to === 'in_service' && from !== 'in_service');
+    const into = listLedgerTransitions().filter(
+      ({ from, to }) => to === 'in_service' && from !== 'in_service',
+    );
     expect(into.map(({ type, from, fromCondemned }) => [type, from, fromCondemned])).toEqual([
       ['accept', 'received', false],
       ['release', 'held', false],

@@ -1,0 +1,144 @@
+import AxeBuilder from '@axe-core/playwright';
+import type { Browser, Locator, Page } from 'playwright-core';
+import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
+import {
+  closeWindows,
+  DESK,
+  launchBrowser,
+  openWindow,
+  PHONE,
+  serveTestStore,
+  takePageErrors,
+  type ServedStore,
+} from '../support/browser';
+import { openWork } from '../support/work';
+import { listRoutes, prepareLooks, type Look } from './steps/routes';
+import { see } from './steps/screen';
+
+let served: ServedStore;
+let browser: Browser;
+let looks: Look[];
+
+beforeAll(async () => {
+  served = await serveTestStore();
+  looks = await prepareLooks(served.store);
+  browser = await launchBrowser();
+});
+afterAll(async () => {
+  await browser.close();
+  await served.close();
+});
+afterEach(async () => {
+  await closeWindows(browser);
+  expect(takePageErrors(), 'the pages ran into errors').toEqual([]);
+});
+
+/** Structure doesn't depend on the colours: in the dark, only they are judged again. */
+const VIEWS = [
+  { name: 'phone, light', viewport: PHONE, colorScheme: 'light', isWhole: true },
+  { name: 'phone, dark', viewport: PHONE, colorScheme: 'dark', isWhole: false },
+  { name: 'desktop, dark', viewport: DESK, colorScheme: 'dark', isWhole: false },
+  { name: 'desktop, light', viewport: DESK, colorScheme: 'light', isWhole: true },
+] as const;
+
+/** Serious and critical findings, each with the rule, the view and the elements. */
+async function listFindings(page: Page): Promise<string[]> {
+  const found: string[] = [];
+  for (const { name, viewport, colorScheme, isWhole } of VIEWS) {
+    await page.setViewportSize(viewport);
+    await page.emulateMedia({ colorScheme, reducedMotion: 'reduce' });
+    const axe = new AxeBuilder({ page }).setLegacyMode(true);
+    const { violations } = await (isWhole ? axe : axe.withRules(['color-contrast'])).analyze();
+    for (const { id, impact, help, nodes } of violations) {
+      if (impact !== 'serious' && impact !== 'critical') continue;
+      const where = nodes.map((node) => node.target.join(' ')).join(' | ');
+      found.push(`${name}: ${id} (${help}) at ${where}`);
+    }
+  }
+  return found;
+}
+
+describe('axe', () => {
+  it('is asked about every route of the client', () => {
+    expect([...new Set(looks.map(({ route }) => route))].sort()).toEqual([...new Set(listRoutes())].sort());
+  });
+
+  it.each([null, 'storekeeper', 'inspector', 'manager', 'admin'])(
+    'finds nothing serious on the pages of %s',
+    async (account) => {
+      const { page } = await openWindow(browser, served.origin, { account });
+      const findings: string[] = [];
+      for (const { at, ready, prepare } of looks.filter((look) => look.account === account)) {
+        await page.setViewportSize(PHONE);
+        await page.goto(at);
+        await see(page, ready);
+        await prepare?.(page);
+        findings.push(...(await listFindings(page)).map((finding) => `${at}, ${finding}`));
+      }
+      expect(findings.join('\n')).toBe('');
+    },
+  );
+});
+
+const MOST_TABS = 80;
+
+/** Presses Tab until the element has the focus; fails when the keyboard can't reach it. */
+async function tabTo(page: Page, target: Locator, what: string): Promise<void> {
+  for (let tab = 0; tab < MOST_TABS; tab++) {
+    await page.keyboard.press('Tab');
+    if (await target.evaluate((element) => element === document.activeElement)) return;
+  }
+  throw new Error(`${what} is not reached within ${MOST_TABS} presses of Tab.`);
+}
+
+const hasFocusRing = (target: Locator): Promise<boolean> =>
+  target.evaluate((element) => {
+    const ringed = element.closest('label') ?? element;
+    return [element, ringed].some((each) => {
+      const { outlineStyle, outlineWidth } = getComputedStyle(each);
+      return outlineStyle !== 'none' && parseFloat(outlineWidth) >= 2;
+    });
+  });
+
+describe('the keyboard', () => {
+  it('reaches the skip link first, which leads past the navigation', async () => {
+    const { page } = await openWindow(browser, served.origin, { account: 'storekeeper', viewport: DESK });
+    await page.goto('/slings');
+    await page.getByRole('heading', { name: 'Slings' }).first().waitFor();
+    await page.keyboard.press('Tab');
+    const skip = page.getByRole('link', { name: 'Skip to the page' });
+    expect(
+      await skip.evaluate((link) => link === document.activeElement),
+      'another element comes first',
+    ).toBe(true);
+    const box = await skip.boundingBox();
+    expect(box && box.y >= 0 && box.height >= 24, 'the skip link stays out of sight').toBe(true);
+    await page.keyboard.press('Enter');
+    await page.keyboard.press('Tab');
+    const isInPage = await page.evaluate(() =>
+      document.getElementById('page')?.contains(document.activeElement),
+    );
+    expect(isInPage, 'after the skip link, Tab goes on outside the page').toBe(true);
+  });
+
+  it('holds a sling and brings it to the cage by itself', async () => {
+    const work = await openWork(served.store);
+    const sling = await work.inService();
+    const { page } = await openWindow(browser, served.origin, { account: 'storekeeper', viewport: DESK });
+    await page.goto(`/slings/${sling.id}/hold`);
+    const tile = page.getByRole('checkbox', { name: 'Overload or shock' });
+    await tile.waitFor();
+    await tabTo(page, tile, 'The tile of a reason');
+    expect(await hasFocusRing(tile), 'the focused tile has no ring').toBe(true);
+    await page.keyboard.press('Space');
+    const hold = page.getByRole('button', { name: 'Hold it' });
+    await tabTo(page, hold, 'The button that holds');
+    expect(await hasFocusRing(hold), 'the focused button has no ring').toBe(true);
+    await page.keyboard.press('Enter');
+    await see(page, 'Now bring it to the cage');
+    await tabTo(page, page.getByRole('button', { name: /^Cage 1/ }), 'The button of the cage');
+    await page.keyboard.press('Enter');
+    await see(page, 'It is secured in Cage 1');
+    expect(await work.read(sling.id)).toMatchObject({ state: 'held', custody: { kind: 'cage' } });
+  });
+});
