@@ -1,4 +1,3 @@
-import { useQuery } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import { ROLE_NAMES } from '../../../shared/domain/access/roles';
 import { LinkButton } from '../../components/ui/Button';
@@ -10,13 +9,13 @@ import { DesignationList } from '../../features/people/components/DesignationLis
 import { DeviceSettings } from '../../features/people/components/DeviceSettings';
 import { PasswordForm } from '../../features/people/components/PasswordForm';
 import { SignOutButton } from '../../features/people/components/SignOutButton';
-import { sitesQuery } from '../../features/places/api/places';
+import { useSites } from '../../lib/places';
 import { hasRole, useSession, useUser } from '../../lib/session';
 
 export function Component(): ReactNode {
   const user = useUser();
   const { refresh } = useSession();
-  const { data: sites = [] } = useQuery(sitesQuery);
+  const sites = useSites().data?.items ?? [];
   const siteNames = sites.filter(({ id }) => user.siteIds.includes(id)).map(({ name }) => name);
   const isInspector = hasRole(user, 'inspector');
   return (

@@ -10,7 +10,7 @@ import { ACTION_WORDS } from '../../features/actions/actionWords';
 import { ActForm } from '../../features/actions/components/ActForm';
 import { SlingLine } from '../../features/actions/components/SlingLine';
 import { useSling } from '../../features/slings/api/getSling';
-import { useLocations } from '../../features/slings/api/places';
+import { useLocations } from '../../lib/places';
 import { useKeepSling } from '../../features/slings/hooks/useKeepSling';
 
 export function Component(): ReactNode {

@@ -13,7 +13,7 @@ import { NotOpen } from '../../features/actions/components/NotOpen';
 import { SlingLine } from '../../features/actions/components/SlingLine';
 import { isChoosable } from '../../features/actions/holdDraft';
 import { useSling } from '../../features/slings/api/getSling';
-import { useLocations } from '../../features/slings/api/places';
+import { useLocations } from '../../lib/places';
 import { useKeepSling } from '../../features/slings/hooks/useKeepSling';
 
 /** `?more` asks for several reasons (`?reason=` arms one); `?held` shows the confirmation, also after a reload. */

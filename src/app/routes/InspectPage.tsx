@@ -17,7 +17,7 @@ import { TypeTabs } from '../../features/inspections/components/TypeTabs';
 import { listTypes } from '../../features/inspections/inspectionTypes';
 import { useSling } from '../../features/slings/api/getSling';
 import { useInspections } from '../../features/slings/api/listInspections';
-import { useLocations, useSites } from '../../features/slings/api/places';
+import { useLocations, useSites } from '../../lib/places';
 import { useKeepSling } from '../../features/slings/hooks/useKeepSling';
 import { useToday } from '../../features/slings/hooks/useToday';
 import { useUser } from '../../lib/session';

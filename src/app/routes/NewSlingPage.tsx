@@ -5,7 +5,7 @@ import { LinkButton } from '../../components/ui/Button';
 import { PageHeader } from '../../components/ui/PageHeader';
 import { EmptyState, ErrorState, SkeletonLines } from '../../components/ui/states';
 import { paths } from '../../config/paths';
-import { useSites } from '../../features/slings/api/places';
+import { useSites } from '../../lib/places';
 import { SlingForm } from '../../features/slings/components/form/SlingForm';
 import { getToday } from '../../lib/format';
 import { useUser } from '../../lib/session';

@@ -1,4 +1,3 @@
-import { useQuery } from '@tanstack/react-query';
 import { useState, type ReactNode } from 'react';
 import { mayCall } from '../../../shared/domain/access/routes';
 import type { Site } from '../../../shared/schemas/places';
@@ -7,7 +6,7 @@ import { Dialog } from '../../components/ui/Dialog';
 import { PageHeader } from '../../components/ui/PageHeader';
 import { EmptyState, ErrorState, SkeletonLines } from '../../components/ui/states';
 import { paths } from '../../config/paths';
-import { locationsQuery, sitesQuery } from '../../features/places/api/places';
+import { useLocations, useSites } from '../../lib/places';
 import { LocationForm } from '../../features/places/components/LocationForm';
 import { SiteForm } from '../../features/places/components/SiteForm';
 import { SitePanel } from '../../features/places/components/SitePanel';
@@ -15,8 +14,8 @@ import { useUser } from '../../lib/session';
 
 export function Component(): ReactNode {
   const { roles } = useUser();
-  const sites = useQuery(sitesQuery);
-  const locations = useQuery(locationsQuery);
+  const sites = useSites();
+  const locations = useLocations();
   const [open, setOpen] = useState<'site' | Site | null>(null);
   const close = (): void => setOpen(null);
   const error = sites.error ?? locations.error;
@@ -36,17 +35,17 @@ export function Component(): ReactNode {
       {!error && !(sites.data && locations.data) && <SkeletonLines lines={9} />}
       {sites.data && locations.data && (
         <div className="grid gap-8 lg:grid-cols-2 lg:gap-x-12">
-          {sites.data.map((site) => (
+          {sites.data.items.map((site) => (
             <SitePanel
               key={site.id}
               site={site}
-              locations={locations.data.filter(({ siteId }) => siteId === site.id)}
+              locations={locations.data.items.filter(({ siteId }) => siteId === site.id)}
               onAddLocation={mayAddLocation ? () => setOpen(site) : undefined}
             />
           ))}
         </div>
       )}
-      {sites.data?.length === 0 && (
+      {sites.data?.items.length === 0 && (
         <EmptyState title="You work at no site yet">
           An administrator gives you one, on the page “Users”. Slings show up then.
         </EmptyState>

@@ -11,7 +11,7 @@ import { EditUser } from '../../features/people/components/EditUser';
 import { NewUser, type MadeLink } from '../../features/people/components/NewUser';
 import { OneTimeLink } from '../../features/people/components/OneTimeLink';
 import { UserList } from '../../features/people/components/UserList';
-import { sitesQuery } from '../../features/places/api/places';
+import { useSites } from '../../lib/places';
 import { hasRole, useUser } from '../../lib/session';
 
 const addressOf = (person: number | 'new'): string => `${paths.users}?person=${person}`;
@@ -30,7 +30,7 @@ export function Component(): ReactNode {
 function Users(): ReactNode {
   const me = useUser();
   const users = useQuery(usersQuery);
-  const sites = useQuery(sitesQuery);
+  const sites = useSites();
   const [query] = useSearchParams();
   const navigate = useNavigate();
   const [made, setMade] = useState<MadeLink | null>(null);
@@ -66,7 +66,7 @@ function Users(): ReactNode {
       <>
         <PageHeader title="Add a person" back={back} />
         <NewUser
-          sites={sites.data}
+          sites={sites.data.items}
           onMade={(answer) => {
             setMade(answer);
             showList();
@@ -83,7 +83,7 @@ function Users(): ReactNode {
         <EditUser
           key={edited.id}
           user={edited}
-          sites={sites.data}
+          sites={sites.data.items}
           isSelf={edited.id === me.id}
           onSaved={showList}
           onLink={setMade}
@@ -95,7 +95,7 @@ function Users(): ReactNode {
     <>
       <PageHeader title="Users" actions={<LinkButton to={addressOf('new')}>Add a person</LinkButton>} />
       {link}
-      <UserList users={users.data} sites={sites.data} addressOf={addressOf} />
+      <UserList users={users.data} sites={sites.data.items} addressOf={addressOf} />
       {users.data.length === 1 && (
         <EmptyState
           title="Only you so far"

@@ -51,7 +51,10 @@ export function ProblemNotice({
 }): ReactNode {
   if (thrown === null || thrown === undefined) return null;
   const problem = toProblem(thrown);
-  const lines = [...problem.unmet.map((u) => u.message), ...problem.errors.map((e) => e.message)];
+  // One refusal is often the sentence itself: nothing is said twice.
+  const lines = [...problem.unmet, ...problem.errors]
+    .map(({ message }) => message)
+    .filter((message) => !problem.detail.includes(message));
   const wait = problem.retryAfterSeconds;
   return (
     <Notice tone="error" title={problem.title} action={action} {...(className ? { className } : {})}>

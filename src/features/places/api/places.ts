@@ -1,5 +1,4 @@
-import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import { listOf } from '../../../../shared/schemas/common';
+import { useMutation, useQueryClient } from '@tanstack/react-query';
 import {
   locationSchema,
   siteSchema,
@@ -7,22 +6,6 @@ import {
   type CreateSiteRequest,
 } from '../../../../shared/schemas/places';
 import { api } from '../../../lib/apiClient';
-
-const PLACES_STALE_MS = 60_000;
-
-/** The sites where the signed-in person works. */
-export const sitesQuery = queryOptions({
-  queryKey: ['sites'],
-  queryFn: async ({ signal }) => (await api.get('/sites', listOf(siteSchema), { signal })).items,
-  staleTime: PLACES_STALE_MS,
-});
-
-/** All locations of those sites. */
-export const locationsQuery = queryOptions({
-  queryKey: ['locations'],
-  queryFn: async ({ signal }) => (await api.get('/locations', listOf(locationSchema), { signal })).items,
-  staleTime: PLACES_STALE_MS,
-});
 
 export function useCreateSite() {
   const client = useQueryClient();

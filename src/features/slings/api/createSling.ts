@@ -1,7 +1,7 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { slingSchema, type CreateSlingRequest, type Sling } from '../../../../shared/schemas/slings';
 import { api } from '../../../lib/apiClient';
-import { useRetryKey } from '../hooks/useRetryKey';
+import { useRetryKey } from '../../../lib/useRetryKey';
 import { slingKeys } from './slingKeys';
 
 /** Puts a sling on the books. */

@@ -1,4 +1,4 @@
-import { useLocations, useSites } from '../api/places';
+import { useLocations, useSites } from '../../../lib/places';
 
 export interface PlaceNames {
   site: (id: number) => string | undefined;

@@ -1,6 +1,6 @@
 import { useSearchParams } from 'react-router-dom';
 import type { Site } from '../../../../shared/schemas/places';
-import { useSites } from '../api/places';
+import { useSites } from '../../../lib/places';
 
 /** The site that the address names, among those where the person works; undefined is all of them. */
 export function useSiteChoice(): { sites: readonly Site[]; siteId: number | undefined } {

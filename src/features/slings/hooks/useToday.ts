@@ -1,5 +1,5 @@
 import { getToday } from '../../../lib/format';
-import { useSites } from '../api/places';
+import { useSites } from '../../../lib/places';
 
 /** Today's date at the site, `YYYY-MM-DD`; the device's while the site is unknown. */
 export function useToday(siteId: number | undefined): string {

@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react';
 import { useFormContext, useWatch } from 'react-hook-form';
 import { RadioTiles } from '../../../../components/ui/Tiles';
-import { useLocations, useSites } from '../../api/places';
+import { useLocations, useSites } from '../../../../lib/places';
 import { SERVICE_CLASS_NAMES, toOptions } from '../../form/options';
 import type { SlingFormValues } from '../../form/values';
 import { FormDate, FormSelect, FormText } from './fields';

@@ -18,7 +18,7 @@ import { toProblem } from '../../../../lib/problem';
 import { useUnits } from '../../../../lib/session';
 import { useFormDraft } from '../../../../lib/useFormDraft';
 import type { useCorrectSling } from '../../api/correctSling';
-import { useSites } from '../../api/places';
+import { useSites } from '../../../../lib/places';
 import {
   buildCorrection,
   makeCorrectionResolver,

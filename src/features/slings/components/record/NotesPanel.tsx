@@ -10,7 +10,7 @@ import { Panel } from '../../../../components/ui/Panel';
 import { showToast } from '../../../../components/ui/Toast';
 import { useDraft } from '../../../../lib/draft';
 import { useUser } from '../../../../lib/session';
-import { useLocations } from '../../api/places';
+import { useLocations } from '../../../../lib/places';
 import { useUpdateSling } from '../../api/updateSling';
 import { usePlaceNames } from '../../hooks/usePlaceNames';
 

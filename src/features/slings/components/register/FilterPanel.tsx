@@ -2,7 +2,7 @@ import { useState, type ReactNode } from 'react';
 import { Button } from '../../../../components/ui/Button';
 import { SelectField } from '../../../../components/ui/inputs';
 import { cx } from '../../../../lib/cx';
-import { useSites } from '../../api/places';
+import { useSites } from '../../../../lib/places';
 import type { RegisterFilters } from '../../hooks/useRegisterFilters';
 import { toOptions } from '../../form/options';
 import {
