@@ -1,5 +1,12 @@
 import { randomBytes } from 'node:crypto';
-import { chooseMasks, findModuleDots, findStock, pickVersion, type QrSymbol } from '../../labels';
+import {
+  chooseMasks,
+  findModuleDots,
+  findStock,
+  labelsPerPage,
+  pickVersion,
+  type QrSymbol,
+} from '../../labels';
 import { drawTagCode, tagPayload, type TagCode } from '../../shared/domain/tags/tagCode';
 import {
   REPRINT_REASON_FACTS,
@@ -60,6 +67,9 @@ export async function printLabels(
   const { transaction, at, user } = context;
   const stock = findStock(request.stock);
   if (!stock) throw invalidField('stock', 'There is no such stock of labels.');
+  if ((request.startAt ?? 1) > labelsPerPage(stock)) {
+    throw invalidField('startAt', `A page of this stock has ${labelsPerPage(stock)} places.`);
+  }
   const [first] = drawn;
   if (first && findModuleDots(stock, first.symbol.version) === null) {
     throw invalidField(

@@ -12,8 +12,8 @@ export function buildOpenApi(routes: readonly Route[]): object {
     const openPath = path.replace(/:(\w+)/g, '{$1}');
     paths[openPath] = { ...paths[openPath], [method.toLowerCase()]: describe(route, path) };
   }
-  return createDocument({
-    openapi: '3.1.0',
+  const document = {
+    openapi: '3.1.0' as const,
     info: {
       title: 'Slingward',
       version: '0.1.0',
@@ -21,6 +21,13 @@ export function buildOpenApi(routes: readonly Route[]): object {
         'Identity, inspection and quarantine of lifting slings. A record-keeping and planning aid: it does not replace inspection by a competent or qualified person, the maker’s instructions, or local codes.',
     },
     paths,
+  };
+  return createDocument(document, {
+    // Answers may grow, and parts of one whole (allOf) must not forbid each other's fields.
+    override: ({ jsonSchema, io }) => {
+      if (io === 'output' && jsonSchema.additionalProperties === false)
+        delete jsonSchema.additionalProperties;
+    },
   });
 }
 
@@ -37,7 +44,9 @@ function describe({ docs, route }: Route, path: string): ZodOpenApiOperationObje
         : {}),
       ...(docs.query instanceof z.ZodObject ? { query: docs.query } : {}),
     },
-    ...(docs.body ? { requestBody: { content: { 'application/json': { schema: docs.body } } } } : {}),
+    ...(docs.body
+      ? { requestBody: { content: { [docs.consumes ?? 'application/json']: { schema: docs.body } } } }
+      : {}),
     responses: {
       '2XX': {
         description: 'Done',

@@ -1,4 +1,4 @@
-import { Op, QueryTypes, type Sequelize } from 'sequelize';
+import { Op, QueryTypes, Transaction, type Sequelize } from 'sequelize';
 import {
   canonicalJson,
   CHAIN_START,
@@ -78,9 +78,23 @@ const BATCH = 500;
 
 /**
  * Recomputes every hash of every chain (or of one sling's) and compares its end with the head that the sling keeps.
- * Reads in batches, so that a large ledger needs little memory.
+ * Reads in batches, so that a large ledger needs little memory, and all from one moment: an act that is written
+ * meanwhile is no fault.
  */
 export async function verifyLedger(siteIds: readonly number[], slingId?: number): Promise<VerifyResponse> {
+  const { sequelize } = SlingRecord;
+  if (!sequelize) throw new Error('The models are not defined yet.');
+  return sequelize.transaction(
+    { isolationLevel: Transaction.ISOLATION_LEVELS.REPEATABLE_READ, readOnly: true },
+    (transaction) => verifyChains(transaction, siteIds, slingId),
+  );
+}
+
+async function verifyChains(
+  transaction: Transaction,
+  siteIds: readonly number[],
+  slingId?: number,
+): Promise<VerifyResponse> {
   let rows = 0;
   let slings = 0;
   for (let after = 0; ;) {
@@ -92,9 +106,10 @@ export async function verifyLedger(siteIds: readonly number[], slingId?: number)
       },
       order: [['id', 'ASC']],
       limit: BATCH,
+      transaction,
     });
     for (const sling of batch) {
-      const result = await verifyChain(sling);
+      const result = await verifyChain(sling, transaction);
       rows += result.rows;
       slings += 1;
       if (result.fault) return { ok: false, rows, slings, firstBad: { slingId: sling.id, ...result.fault } };
@@ -107,6 +122,7 @@ export async function verifyLedger(siteIds: readonly number[], slingId?: number)
 
 async function verifyChain(
   sling: SlingRecord,
+  transaction: Transaction,
 ): Promise<{ rows: number; fault: { slingSeq: number; message: string } | null }> {
   let head = { seq: 0, hash: CHAIN_START };
   for (;;) {
@@ -114,6 +130,7 @@ async function verifyChain(
       where: { slingId: sling.id, slingSeq: { [Op.gt]: head.seq } },
       order: [['slingSeq', 'ASC']],
       limit: BATCH,
+      transaction,
     });
     const result = followChain(
       entries.map((entry) => ({ ...contentOf(entry), hash: entry.hash })),

@@ -77,10 +77,16 @@ async function keepUpload(
 const fileParams = z.object({ id: fileIdSchema });
 const fileQuery = z.strictObject({ w: z.enum(['160', '320', '640', '1280']).optional() });
 
+const uploadForm = {
+  body: z.object({ file: z.string().meta({ format: 'binary', description: 'JPEG, PNG, WebP or PDF' }) }),
+  consumes: 'multipart/form-data',
+};
+
 export const fileRoutes = [
   raw({
     route: 'POST /api/files',
     summary: 'Upload a photo or a PDF (multipart field "file", up to 10 MB)',
+    ...uploadForm,
     response: storedFileSchema,
     limit: 'upload',
     async handle(services, { request, response }) {
@@ -119,6 +125,7 @@ export const fileRoutes = [
     route: 'POST /api/public/tags/:code/files',
     summary: 'A photo for a damage report, without sign-in',
     params: codeParams,
+    ...uploadForm,
     response: storedFileSchema,
     limit: 'publicWrite',
     async handle(services, { params, request, response }) {

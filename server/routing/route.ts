@@ -12,6 +12,8 @@ interface RouteDocs {
   response?: z.ZodType;
   /** Content type of an answer that is not JSON. */
   produces?: string;
+  /** Content type of a body that is not JSON. */
+  consumes?: string;
   limit?: LimitName;
 }
 

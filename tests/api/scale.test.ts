@@ -41,10 +41,19 @@ async function measure(query: object, sites: number[]) {
   const ms = performance.now() - t;
   options.logging = false;
   const sql = seen.find((text) => /FROM slings s/.test(text)) ?? '';
-  const rows = await store.database.adminQuery(`FLUSH STATUS; ${sql}; SHOW SESSION STATUS LIKE 'Handler_read%'`);
+  const rows = await store.database.adminQuery(
+    `FLUSH STATUS; ${sql}; SHOW SESSION STATUS LIKE 'Handler_read%'`,
+  );
   const reads = rows.reduce((sum, row) => sum + Number(row.Value), 0);
   const plan = await store.database.adminQuery(`EXPLAIN ${sql}`);
-  return { ms, reads, page, plan: plan.filter((r) => r.table === 's' || r.table==='slings').map((r) => `${r.table}:${r.type}:${r.key}:${r.rows}:${r.Extra}`) };
+  return {
+    ms,
+    reads,
+    page,
+    plan: plan
+      .filter((r) => r.table === 's' || r.table === 'slings')
+      .map((r) => `${r.table}:${r.type}:${r.key}:${r.rows}:${r.Extra}`),
+  };
 }
 
 describe('x', () => {
@@ -81,8 +90,15 @@ describe('x', () => {
         { q: 'zzz' },
       ]) {
         const a = await measure({ limit: '50', ...query }, sites);
-        const b = a.page.nextCursor ? await measure({ limit: '50', ...query, cursor: a.page.nextCursor }, sites) : null;
-        console.error(sites.length, JSON.stringify(query), `n=${a.page.rows.length} reads=${a.reads} ms=${a.ms.toFixed(0)} next=${b?.reads} ${b?.ms.toFixed(0)}`, a.plan.join(' | '));
+        const b = a.page.nextCursor
+          ? await measure({ limit: '50', ...query, cursor: a.page.nextCursor }, sites)
+          : null;
+        console.error(
+          sites.length,
+          JSON.stringify(query),
+          `n=${a.page.rows.length} reads=${a.reads} ms=${a.ms.toFixed(0)} next=${b?.reads} ${b?.ms.toFixed(0)}`,
+          a.plan.join(' | '),
+        );
       }
     }
     expect(1).toBe(1);

@@ -122,7 +122,7 @@ describe('a handheld scanner', () => {
     await page.getByRole('heading', { name: 'Cage' }).first().waitFor();
     await scanByHand(page, link);
     await seeTheSling(page);
-    await page.goto(`/slings/${sling.id}/hold`);
+    await page.goto(`/slings/${sling.id}/hold?more`);
     await page.getByRole('checkbox', { name: 'Something else' }).check();
     const note = page.getByLabel('What is it?');
     await note.fill('Paint on');

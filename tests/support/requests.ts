@@ -28,7 +28,7 @@ const LEAKS = [
   /\n\s+at .+:\d+/,
   /node_modules/,
   /\b(?:SELECT|INSERT INTO|UPDATE|DELETE FROM) .*\b(?:FROM|VALUES|SET|WHERE)\b/,
-  /SQLSTATE|ER_[A-Z_]{4,}|Sequelize|mariadb/i,
+  /SQLSTATE|\bER_[A-Z_]{4,}|[Ss]equelize|[Mm]aria[Dd][Bb]/,
   /(?:^|[\s"'(])\/(?:home|root|tmp|usr|var|etc|opt|work)\//,
   /\.(?:ts|js|mjs):\d+/,
 ];

@@ -1,4 +1,4 @@
-import { EVALUATION_OUTCOMES } from '../../../shared/domain/lifecycle/facts';
+import type { EVALUATION_OUTCOMES } from '../../../shared/domain/lifecycle/facts';
 import { requiredProofLoadKg } from '../../../shared/domain/quarantine/proofLoad';
 import { confirmDestroyed, recordOutcome } from '../../commands/recordOutcome';
 import { createShipment, sendShipment } from '../../commands/shipSlings';

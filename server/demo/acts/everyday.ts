@@ -10,11 +10,20 @@ const YEAR_DAYS = 365;
 const LEAST_DUE_IN = 35;
 const FREQUENT_COUNT = { normal: 0.08, severe: 2, special: 2 };
 
-/** Registered the day it came, labelled, confirmed, inspected and accepted the day after. The first of a lot prints for all. */
+/**
+ * Registered the day it came, labelled, confirmed; inspected and accepted the day after. The first of a lot prints for
+ * all, and the lot goes through each step together.
+ */
 export function playBeginning({ sling, clock, keeper, inspector, add }: Script): void {
   const { lot, place } = sling;
   const { receivedAgo, arrival } = lot;
-  add(clock.at(receivedAgo, 8, 2 * place), keeper, (context, world) => register(context, world, sling));
+  const round = (step: string): string => `${step} ${lot.name}`;
+  add(
+    clock.at(receivedAgo, 8, 2 * place),
+    keeper,
+    (context, world) => register(context, world, sling),
+    round('register'),
+  );
   if (arrival === 'unlabelled') return;
   if (place === 0) {
     add(clock.at(receivedAgo, 11), keeper, (context, world) =>
@@ -26,13 +35,24 @@ export function playBeginning({ sling, clock, keeper, inspector, add }: Script):
     );
   }
   if (arrival === 'printed') return;
-  add(clock.at(receivedAgo, 13, 3 * place), keeper, (context, world) => confirm(context, world, sling));
-  add(clock.at(receivedAgo - 1, 9, 7 * place), inspector, (context, world) =>
-    inspect(context, world, sling, 'initial'),
+  add(
+    clock.at(receivedAgo, 13, 3 * place),
+    keeper,
+    (context, world) => confirm(context, world, sling),
+    round('confirm'),
+  );
+  add(
+    clock.at(receivedAgo - 1, 9, 7 * place),
+    inspector,
+    (context, world) => inspect(context, world, sling, 'initial'),
+    round('inspect'),
   );
   if (arrival === 'inspected') return;
-  add(clock.at(receivedAgo - 1, 9, 7 * place + 5), inspector, (context, world) =>
-    accept(context, world, sling),
+  add(
+    clock.at(receivedAgo - 1, 11, 2 * place),
+    inspector,
+    (context, world) => accept(context, world, sling),
+    round('accept'),
   );
 }
 

@@ -14,7 +14,12 @@ export interface Script {
   /** Another than `inspector`, where the site has two. */
   secondInspector: DemoAccount;
   manager: DemoAccount;
-  add: (at: Date, by: DemoAccount, run: (context: ActorContext, world: World) => Promise<unknown>) => void;
+  add: (
+    at: Date,
+    by: DemoAccount,
+    run: (context: ActorContext, world: World) => Promise<unknown>,
+    round?: string,
+  ) => void;
 }
 
 export function openScript(sling: DemoSling, clock: DemoClock, random: Random, acts: Act[]): Script {
@@ -27,6 +32,6 @@ export function openScript(sling: DemoSling, clock: DemoClock, random: Random, a
     inspector,
     secondInspector,
     manager: random.pick(managers),
-    add: (at, by, run) => acts.push({ at, by, run }),
+    add: (at, by, run, round) => acts.push({ at, by, run, ...(round === undefined ? {} : { round }) }),
   };
 }

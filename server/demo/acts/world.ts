@@ -43,6 +43,8 @@ export interface SlingTrace {
 export interface Act {
   at: Date;
   by: DemoAccount;
+  /** Acts on different slings of one lot, the same work on each: done side by side where they follow one another. */
+  round?: string;
   run: (context: ActorContext, world: World) => Promise<unknown>;
 }
 

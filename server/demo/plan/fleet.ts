@@ -8,6 +8,8 @@ export type Arrival = 'unlabelled' | 'printed' | 'inspected';
 
 /** Slings of one model that came in one carton: registered, labelled and inspected together. */
 export interface DemoLot {
+  /** Unlike that of every other lot. */
+  name: string;
   model: SlingModel;
   count: number;
   site: DemoSite;
@@ -24,7 +26,7 @@ export interface DemoSling {
   lot: DemoLot;
 }
 
-interface SpecialLot extends Omit<DemoLot, 'model' | 'serviceClass'> {
+interface SpecialLot extends Omit<DemoLot, 'name' | 'model' | 'serviceClass'> {
   modelId: string;
 }
 
@@ -64,7 +66,7 @@ export function drawFleet(random: Random): DemoSling[] {
   const special = [...ARRIVALS, ...HIRES].map(({ modelId, ...lot }): DemoLot => {
     const model = SLING_MODELS.find(({ id }) => id === modelId);
     if (!model) throw new Error(`There is no model ${modelId}.`);
-    return { ...lot, model, serviceClass: 'normal' };
+    return { ...lot, name: `${modelId} of day ${lot.receivedAgo}`, model, serviceClass: 'normal' };
   });
   const lots = [...special, ...drawLots(random, special)].sort((a, b) => b.receivedAgo - a.receivedAgo);
   return lots
@@ -86,6 +88,7 @@ function drawLots(random: Random, special: readonly DemoLot[]): DemoLot[] {
   });
   return random.shuffle(sited).map((lot, index) => ({
     ...lot,
+    name: `lot ${index}`,
     receivedAgo: receivedAgo(index / sited.length),
     serviceClass: random.next() < 0.12 ? 'severe' : 'normal',
   }));

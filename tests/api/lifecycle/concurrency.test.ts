@@ -125,6 +125,26 @@ describe('twenty clients on one sling at once', () => {
   });
 });
 
+describe('a check of the ledger while others write', () => {
+  it('sees one moment: what is written meanwhile is no fault', async () => {
+    const sling = await work.register();
+    const isDone = { value: false };
+    const writing = atOnce(4, async (index) => {
+      for (let round = 0; round < 8; round += 1) {
+        const reasons = [{ code: 'other', note: `Client ${index}, round ${round}` }];
+        expectStatus(await tryAct(store, 'storekeeper', sling.id, 'hold', { reasons }), 200);
+      }
+    }).finally(() => {
+      isDone.value = true;
+    });
+    const checks = [await verifyLedger(store, sling.id)];
+    while (!isDone.value) checks.push(await verifyLedger(store, sling.id));
+    await writing;
+    expect(checks.filter(({ ok }) => !ok)).toEqual([]);
+    expect(await verifyLedger(store, sling.id)).toMatchObject({ ok: true, rows: 33 });
+  });
+});
+
 describe('the same request again', () => {
   it('acts once for ten at once under one key, with the same answer to all', async () => {
     const sling = await work.register();

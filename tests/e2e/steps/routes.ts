@@ -114,7 +114,8 @@ export async function prepareLooks(store: TestStore): Promise<Look[]> {
       await press('Register the sling')(page);
       await see(page, 'to put right');
     }),
-    look('storekeeper', '/slings/:id/hold', `/slings/${inService.id}/hold`, 'Why?', async (page) => {
+    look('storekeeper', '/slings/:id/hold', `/slings/${inService.id}/hold`, 'Why?'),
+    look('storekeeper', '/slings/:id/hold', `/slings/${inService.id}/hold?more`, 'Why?', async (page) => {
       await page.getByRole('checkbox', { name: 'Something else' }).check();
       await press('Hold it')(page);
       await see(page, 'Say what it is.');

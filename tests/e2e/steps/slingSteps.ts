@@ -57,10 +57,9 @@ export async function inspectClean(page: Page): Promise<void> {
   await page.getByRole('heading', { name: 'Inspection recorded' }).waitFor();
 }
 
-/** Holds with one tile: the two taps. */
+/** On the hold page: the tile of a reason holds at once. */
 export async function holdFor(page: Page, reason: string): Promise<void> {
-  await page.getByRole('checkbox', { name: reason }).check();
-  await page.getByRole('button', { name: 'Hold it' }).click();
+  await page.getByRole('button', { name: reason }).click();
   await page.waitForURL(/[?&]held/);
   await see(page, reason);
 }

@@ -55,35 +55,51 @@ const HELPER_ROLES: Record<string, string[]> = {
   outcome: ['manager'],
 };
 
-/** Steps that lead further from each state, so that random walks get far; the rest stays as random as it comes. */
-const LEADS: Record<string, string[]> = {
-  received: ['accept', 'inspect', 'print', 'confirm', 'hold', 'depart', 'report_lost'],
-  in_service: ['hold', 'inspect', 'hold', 'report_lost', 'print', 'confirm', 'depart', 'outcome'],
+/** Steps that lead further from each state, some with the variant that does it: random walks then get everywhere. */
+const LEADS: Record<string, [name: string, variant?: number][]> = {
+  received: [['accept'], ['inspect', 1], ['print', 0], ['confirm'], ['hold'], ['inspect']],
+  in_service: [['hold'], ['hold', 0], ['inspect'], ['report_lost'], ['outcome'], ['depart']],
   held: [
-    'secure',
-    'inspect',
-    'release',
-    'send',
-    'condemn',
-    'send',
-    'inspect',
-    'withdraw_as_error',
-    'hold',
-    'confirm',
+    ['inspect', 0],
+    ['release', 0],
+    ['inspect', 0],
+    ['release', 0],
+    ['secure', 0],
+    ['send'],
+    ['send', 0],
+    ['condemn'],
+    ['withdraw_as_error', 0],
+    ['confirm'],
+    ['print', 0],
+    ['inspect', 1],
   ],
-  'held+': ['destroy', 'inspect', 'withdraw_as_error', 'send', 'secure', 'report_lost'],
+  'held+': [
+    ['destroy'],
+    ['inspect', 4],
+    ['withdraw_as_error', 0],
+    ['withdraw_as_error', 0],
+    ['send'],
+    ['secure', 0],
+  ],
   sent_for_evaluation: [
-    'receive_back',
-    'outcome',
-    'outcome',
-    'receive_back',
-    'hold',
-    'destroyed_by_evaluator',
+    ['receive_back'],
+    ['outcome', 0],
+    ['outcome', 12 + 2],
+    ['outcome'],
+    ['hold'],
+    ['outcome', 5],
   ],
-  'sent_for_evaluation+': ['receive_back', 'outcome', 'destroyed_by_evaluator', 'report_lost'],
-  returned: ['return_to_service', 'inspect', 'inspect', 'hold', 'outcome', 'confirm', 'print'],
-  lost: ['found', 'hold'],
-  'lost+': ['found', 'hold'],
+  'sent_for_evaluation+': [['receive_back'], ['outcome', 5], ['destroyed_by_evaluator'], ['report_lost']],
+  returned: [
+    ['return_to_service'],
+    ['inspect', 0],
+    ['return_to_service'],
+    ['hold'],
+    ['outcome'],
+    ['confirm'],
+  ],
+  lost: [['found'], ['hold']],
+  'lost+': [['found'], ['hold']],
 };
 const EVERYTHING = [...ACTIONS, ...HELPERS];
 
@@ -91,18 +107,21 @@ const take = <T>(list: readonly T[], figure: number, otherwise: T): T =>
   list[figure % list.length] ?? otherwise;
 
 export function chooseCommand(model: Model, { pick, person, variant, oddity }: Draw): Command {
-  const isLeading = pick % 10 < 7;
-  const name = take(
-    isLeading ? (LEADS[placeOf(model)] ?? EVERYTHING) : EVERYTHING,
-    Math.floor(pick / 10),
-    'hold',
-  );
+  const leads = LEADS[placeOf(model)] ?? [];
+  const isLeading = pick % 10 < 7 && leads.length > 0;
+  const figure = Math.floor(pick / 10);
+  const [name, given = variant] = isLeading
+    ? take(leads, figure, ['hold'])
+    : [take(EVERYTHING, figure, 'hold')];
   const roles = TABLE[name]?.by ?? HELPER_ROLES[name] ?? [];
   const able = PEOPLE.filter((account) => roles.includes(roleOf(account)));
-  const by = take(person % 8 === 7 ? PEOPLE : able, Math.floor(person / 8), 'storekeeper');
+  const anyone = take(person % 8 === 7 ? PEOPLE : able, Math.floor(person / 8), 'storekeeper');
+  // Whoever inspected it is the one who releases it, most times.
+  const inspector =
+    isLeading && name === 'release' && person % 4 !== 3 ? model.inspections.at(-1)?.by : undefined;
   const isAction = ACTIONS.includes(name) && name !== 'send' && name !== 'destroyed_by_evaluator';
   const odd = isAction ? take(['stale', 'unknown', 'elsewhere'] as const, oddity, 'stale') : 'none';
-  return { name, by, variant, oddity: oddity % 100 < 92 ? 'none' : odd };
+  return { name, by: inspector ?? anyone, variant: given, oddity: oddity < 92 ? 'none' : odd };
 }
 
 export const HOLD_CODES = [
@@ -140,7 +159,7 @@ export const variants = {
         : take(['evaluate', 'repair'] as const, v, 'evaluate'),
   outcome: (v: number) => take(OUTCOMES, v, 'fit'),
   hasReport: (v: number) => v % 4 !== 3,
-  isProven: (v: number) => v % 3 !== 2,
+  isProven: (v: number) => v % 5 !== 4,
   cause: (v: number) =>
     take(['off_hire', 'sold', 'transferred_out', 'registered_in_error'] as const, v, 'transferred_out'),
   withdrawsCondemnation: (v: number, model: Model) => (model.condemned ? v % 4 !== 3 : v % 8 === 7),

@@ -12,7 +12,7 @@ import { ACTIONS, allowedFrom, mayUse, newModel, TABLE, type Model } from './mod
 const RUNS = 40;
 const COMMANDS = 25;
 /** A slow machine does fewer runs rather than hold up everything. */
-const TIME_LIMIT_MS = 200_000;
+const TIME_LIMIT_MS = 55_000;
 
 let fixtures: Fixtures;
 
@@ -43,7 +43,7 @@ const draw: fc.Arbitrary<Draw> = fc.record({
 const run = fc.record({
   isChain: fc.boolean(),
   isHired: fc.boolean(),
-  startsInService: fc.boolean(),
+  start: fc.constantFrom('received', 'in_service', 'sent_for_evaluation'),
   draws: fc.array(draw, { minLength: COMMANDS, maxLength: COMMANDS }),
 });
 
@@ -98,44 +98,66 @@ async function doCommand(real: Real, model: Model, command: Command, story: stri
   if (expected === 412) expect(problemOf(answer).changes?.length, story.at(-1)).toBeGreaterThan(0);
 }
 
-async function startInService(real: Real, model: Model, story: string[]): Promise<void> {
-  for (const [name, by, variant] of [
-    ['print', 'storekeeper', 0],
-    ['confirm', 'storekeeper', 0],
-    ['inspect', 'inspector', 1],
-    ['accept', 'inspector', 0],
-  ] as const) {
+const INTO_SERVICE = [
+  ['print', 'storekeeper', 0],
+  ['confirm', 'storekeeper', 0],
+  ['inspect', 'inspector', 1],
+  ['accept', 'inspector', 0],
+] as const;
+const AWAY = [
+  ...INTO_SERVICE,
+  ['hold', 'storekeeper', 0],
+  ['secure', 'storekeeper', 0],
+  ['send', 'manager', 0],
+] as const;
+
+/** Some walks begin further on, so that the ways back from evaluation are walked as well. */
+async function leadTo(start: string, real: Real, model: Model, story: string[]): Promise<void> {
+  const steps = { in_service: INTO_SERVICE, sent_for_evaluation: AWAY }[start] ?? [];
+  for (const [name, by, variant] of steps) {
     await doCommand(real, model, { name, by, variant, oddity: 'none' }, story);
   }
-  expect(model.state).toBe('in_service');
+  expect(model.state).toBe(start);
 }
 
 describe('random commands of random people', () => {
   it(
     'leave every sling where an independent model of the table says, and its ledger whole',
     async () => {
-      const property = fc.asyncProperty(run, async ({ isChain, isHired, startsInService, draws }) => {
-        const model = newModel(isChain, isHired);
-        const real = await startReal(fixtures, isChain, isHired);
-        const story: string[] = [`${isHired ? 'hired' : 'own'} ${real.sling.kind}`];
-        if (startsInService) await startInService(real, model, story);
-        for (const one of draws) await doCommand(real, model, chooseCommand(model, one), story);
-        compare(await fixtures.scenes.work.read(real.sling.id), model, story.join('\n'));
-        expect(await verifyLedger(fixtures.scenes.store, real.sling.id)).toMatchObject({
-          ok: true,
-          rows: model.seq,
-        });
+      const giveUpAt = Date.now() + TIME_LIMIT_MS;
+      let runs = 0;
+      const property = fc.asyncProperty(run, async ({ isChain, isHired, start, draws }) => {
+        if (Date.now() > giveUpAt) return;
+        runs += 1;
+        const story: string[] = [];
+        const begin = async () => {
+          const begun = {
+            model: newModel(isChain, isHired),
+            real: await startReal(fixtures, isChain, isHired),
+          };
+          story.push(`${isHired ? 'hired' : 'own'} ${begun.real.sling.kind}`);
+          await leadTo(start, begun.real, begun.model, story);
+          return begun;
+        };
+        const end = async ({ real, model }: { real: Real; model: Model }) => {
+          compare(await fixtures.scenes.work.read(real.sling.id), model, story.join('\n'));
+          const verified = await verifyLedger(fixtures.scenes.store, real.sling.id);
+          expect(verified, story.join('\n')).toMatchObject({ ok: true, rows: model.seq });
+        };
+        let now = await begin();
+        for (const one of draws) {
+          // Of a sling that is gone little is left to try: mostly another one takes its place.
+          if (allowedFrom(now.model).length === 0 && one.oddity % 3 > 0) {
+            await end(now);
+            now = await begin();
+          }
+          await doCommand(now.real, now.model, chooseCommand(now.model, one), story);
+        }
+        await end(now);
       });
-      const details = await fc.check(property, {
-        numRuns: RUNS,
-        seed: 19_104,
-        interruptAfterTimeLimit: TIME_LIMIT_MS,
-        markInterruptAsFailure: false,
-      });
-      if (details.failed) throw new Error(fc.defaultReportMessage(details), { cause: details.errorInstance });
-      console.log(details.numRuns, details.interrupted, [...succeeded].join(), [...statuses]);
-      expect(details.numRuns).toBeGreaterThan(0);
-      if (!details.interrupted) {
+      await fc.assert(property, { numRuns: RUNS, seed: 19_104 });
+      expect(runs).toBeGreaterThan(0);
+      if (runs === RUNS) {
         // The walks got everywhere: every action was done, every kind of refusal came.
         expect(ACTIONS.filter((action) => !succeeded.has(action))).toEqual([]);
         expect([401, 403, 404, 409, 412, 422].filter((status) => !statuses.has(status))).toEqual([]);

@@ -1,9 +1,12 @@
+import { answerAction } from '../../../../shared/domain/lifecycle/answer';
+import type { SlingAction } from '../../../../shared/domain/lifecycle/actions';
 import type {
   Actor,
   EvaluationFact,
   LifecycleFacts,
   OpenReason,
 } from '../../../../shared/domain/lifecycle/facts';
+import type { KindAndSpec } from '../../../../shared/domain/slings/spec';
 
 export const STOREKEEPER: Actor = { id: 1, roles: ['storekeeper'], designation: null };
 export const INSPECTOR: Actor = { id: 2, roles: ['inspector'], designation: { isQualified: true } };
@@ -100,3 +103,31 @@ export function returned(changes: Partial<LifecycleFacts> = {}): LifecycleFacts 
     ...changes,
   });
 }
+
+export const rulesOf = (action: SlingAction, facts: LifecycleFacts, actor: Actor = INSPECTOR): string[] =>
+  answerAction(action, facts, actor)
+    .unmet.map(({ rule }) => rule)
+    .sort();
+
+/** Each row is one thing taken away from facts that lack nothing; the rules are all that is then unmet. */
+export type Missing = [string, Partial<LifecycleFacts>, string[]];
+
+export const web: KindAndSpec = {
+  kind: 'synthetic-web',
+  spec: { fibre: 'polyester', widthMm: 60, plies: 2, type: 'eye_eye_flat' },
+};
+export const wireRope = (
+  splice: 'flemish' | 'hand_tucked' | 'turnback' | 'swaged_socket' | 'poured_socket' | 'welded_end',
+) =>
+  ({
+    kind: 'wire-rope',
+    spec: {
+      construction: 'strand_laid',
+      className: '6x36',
+      diameterMm: 16,
+      core: 'iwrc',
+      ropeGrade: 'eips',
+      splice,
+    },
+  }) as const;
+export const mesh: KindAndSpec = { kind: 'metal-mesh', spec: { duty: 'heavy', widthMm: 150, wireMm: 3.4 } };
