@@ -2,13 +2,14 @@ import { QueryTypes, type Sequelize, type Transaction } from 'sequelize';
 import { SequelizeStorage, Umzug } from 'umzug';
 import { listLedgerTransitions } from '../../shared/domain/lifecycle/events';
 import * as guards from '../migrations/0004-guards';
+import * as listOrders from '../migrations/0005-list-orders';
 import * as labels from '../migrations/0003-labels-and-shipments';
 import * as people from '../migrations/0001-people-and-places';
 import * as slings from '../migrations/0002-slings';
 import { connectDatabase } from './connection';
 import { grantAppAccount } from './grants';
 
-const MIGRATIONS = [people, slings, labels, guards];
+const MIGRATIONS = [people, slings, labels, guards, listOrders];
 
 /** Brings the database to the newest form; several processes may call it at once, one does the work. */
 export async function migrate(sequelize: Sequelize): Promise<string[]> {

@@ -77,7 +77,7 @@ export async function getSling(
           : { id: reason.placedBy, name: names.get(reason.placedBy) ?? 'Somebody' },
       placedAt: reason.placedAt.toISOString(),
       note: reason.note,
-      clearing: clearingOf(reason.code, record.kind),
+      clearing: clearingOf(reason.code, record.kind, Boolean(reason.confirmed)),
     })),
     allowedActions: answerActions(toFacts(record, parts), toActor(context.user, record.kind, today)),
     headHash: record.headHash,

@@ -12,12 +12,12 @@ interface SortFacts {
   valueOf: (row: SummaryRow) => string | null;
 }
 
-/** What each order sorts by; the id breaks ties. Null due dates (never inspected) come last. */
+/** What each order sorts by, each with an index of its site; the id breaks ties. Never inspected ones come last. */
 const SORTS: Record<SlingsQuery['sort'], SortFacts> = {
   number: { column: 's.number', direction: 'ASC', valueOf: (row) => row.number },
   '-number': { column: 's.number', direction: 'DESC', valueOf: (row) => row.number },
   nextDueOn: {
-    column: "COALESCE(s.next_due_on, '9999-12-31')",
+    column: 's.due_sort_on',
     direction: 'ASC',
     valueOf: (row) => row.nextDueOn ?? '9999-12-31',
   },
@@ -32,30 +32,46 @@ interface Where {
   values: unknown[];
 }
 
-/** A page of the register, by key: the cursor names the last row, so pages never shift under a reader. */
+/**
+ * A page of the register, by key: the cursor names the last row, so pages never shift under a reader. Each site is
+ * read on its own along its index and the pages are merged: one query over several sites would sort them whole.
+ */
 export async function listSlings(
   sequelize: Sequelize,
   siteIds: readonly number[],
   query: SlingsQuery,
   at: Date,
 ): Promise<{ rows: SummaryRow[]; nextCursor: string | null }> {
-  const sites = query.siteId === undefined ? siteIds : siteIds.filter((id) => id === query.siteId);
+  const ids = query.siteId === undefined ? siteIds : siteIds.filter((id) => id === query.siteId);
+  const sites = await Site.findAll({ attributes: ['id', 'timeZone'], where: { id: [...ids] } });
   if (sites.length === 0) return { rows: [], nextCursor: null };
   const sort = SORTS[query.sort];
-  const where: Where = { sql: ['s.site_id IN (?)'], values: [sites] };
-  addFilters(where, query);
-  await addDueFilter(where, query, sites, at);
-  addSearch(where, query.q);
-  addCursor(where, sort, query.cursor);
+  const order = `ORDER BY ${sort.column} ${sort.direction}, s.id ${sort.direction} LIMIT ?`;
+  const take = query.limit + 1;
+  const branches = sites.map((site) => {
+    const where = describeSite(site, query, sort, at);
+    return {
+      sql: `(SELECT s.id FROM slings s WHERE ${where.sql.join(' AND ')} ${order})`,
+      values: [...where.values, take],
+    };
+  });
   const rows = await sequelize.query<SummaryRow>(
-    `SELECT ${SUMMARY_COLUMNS} FROM slings s ${SUMMARY_JOINS}
-     WHERE ${where.sql.join(' AND ')}
-     ORDER BY ${sort.column} ${sort.direction}, s.id ${sort.direction} LIMIT ?`,
-    { replacements: [...where.values, query.limit + 1], type: QueryTypes.SELECT },
+    `SELECT ${SUMMARY_COLUMNS} FROM (${branches.map(({ sql }) => sql).join(' UNION ALL ')}) page
+     JOIN slings s ON s.id = page.id ${SUMMARY_JOINS} ${order}`,
+    { replacements: [...branches.flatMap(({ values }) => values), take], type: QueryTypes.SELECT },
   );
   const page = rows.slice(0, query.limit);
   const last = page.at(-1);
   return { rows: page, nextCursor: rows.length > query.limit && last ? writeCursor(sort, last) : null };
+}
+
+function describeSite(site: Site, query: SlingsQuery, sort: SortFacts, at: Date): Where {
+  const where: Where = { sql: ['s.site_id = ?'], values: [site.id] };
+  addFilters(where, query);
+  addDueFilter(where, query, dayInZone(at, site.timeZone));
+  addSearch(where, query.q, site.id);
+  addCursor(where, sort, query.cursor);
+  return where;
 }
 
 function addFilters(where: Where, query: SlingsQuery): void {
@@ -69,66 +85,51 @@ function addFilters(where: Where, query: SlingsQuery): void {
   if (query.secured === 'true') add("s.custody_kind = 'cage'");
   if (query.secured === 'false') add("s.custody_kind <> 'cage'");
   if (query.condemned) add('s.condemned = ?', query.condemned === 'true');
-  if (query.label === 'live') add('tl.code IS NOT NULL');
-  if (query.label === 'printed') add('tp.code IS NOT NULL');
+  const live = 'EXISTS (SELECT 1 FROM tags WHERE live_key = s.id)';
+  const printed = 'EXISTS (SELECT 1 FROM tags WHERE printed_key = s.id)';
+  if (query.label === 'live') add(live);
+  if (query.label === 'printed') add(printed);
   if (query.label === 'none') {
-    add('tl.code IS NULL AND tp.code IS NULL');
+    add(`NOT ${live} AND NOT ${printed}`);
     // One that is gone needs no label any more.
     if (!query.state) add("s.state NOT IN ('destroyed', 'departed')");
   }
 }
 
-/** "Today" differs by site: sites whose calendars agree share one condition. */
-async function addDueFilter(
-  where: Where,
-  query: SlingsQuery,
-  siteIds: readonly number[],
-  at: Date,
-): Promise<void> {
-  if (!query.due) return;
-  const sites = await Site.findAll({ where: { id: [...siteIds] } });
-  const byDay = new Map<string, number[]>();
-  for (const site of sites) {
-    const day = dayInZone(at, site.timeZone);
-    byDay.set(day, [...(byDay.get(day) ?? []), site.id]);
-  }
-  const range = {
-    overdue: 's.next_due_on < ?',
-    soon: `s.next_due_on BETWEEN ? AND DATE_ADD(?, INTERVAL ${SOON_DAYS} DAY)`,
-    ok: `s.next_due_on > DATE_ADD(?, INTERVAL ${SOON_DAYS} DAY)`,
-  }[query.due];
-  const parts: string[] = [];
-  for (const [day, ids] of byDay) {
-    parts.push(`(s.site_id IN (?) AND ${range})`);
-    where.values.push(ids, ...Array.from({ length: range.split('?').length - 1 }, () => day));
-  }
-  where.sql.push(`(${parts.join(' OR ')})`);
+/** @param today the site's own date */
+function addDueFilter(where: Where, { due }: SlingsQuery, today: string): void {
+  if (!due) return;
+  const soonUntil = `DATE_ADD(?, INTERVAL ${SOON_DAYS} DAY)`;
+  const ranges = {
+    overdue: 's.due_sort_on < ?',
+    soon: `s.due_sort_on >= ? AND s.due_sort_on <= ${soonUntil}`,
+    ok: `s.due_sort_on > ${soonUntil} AND s.next_due_on IS NOT NULL`,
+  };
+  where.sql.push(ranges[due]);
+  where.values.push(...(due === 'soon' ? [today, today] : [today]));
 }
-
-/** How many finds of each kind a search looks at: whoever finds more types another character. */
-const SEARCH_LIMIT = 1000;
 
 const WORD_COLUMNS = 'number, maker_serial, stock_number, lot, maker';
 
-/** By the beginning of number, serial or lot, by whole words in any of them, or by tag code. */
-function addSearch(where: Where, q: string | undefined): void {
+/** By the beginning of number, serial, lot or maker, by words that begin so in any of them, or by tag code. */
+function addSearch(where: Where, q: string | undefined, siteId: number): void {
   const text = q?.trim();
   if (!text) return;
+  const parts: string[] = [];
+  const find = (condition: string, ...values: string[]): void => {
+    parts.push(`SELECT id FROM slings WHERE site_id = ? AND ${condition}`);
+    where.values.push(siteId, ...values);
+  };
   const prefix = `${text.replace(/[\\%_]/g, '\\$&')}%`;
-  const parts = ['number', 'maker_serial', 'lot', 'maker'].map(
-    (column) => `(SELECT id FROM slings WHERE ${column} LIKE ? LIMIT ${SEARCH_LIMIT})`,
-  );
-  where.values.push(prefix, prefix, prefix, prefix);
+  for (const column of ['number', 'maker_serial', 'lot', 'maker']) find(`${column} LIKE ?`, prefix);
   const words = text.match(/[\p{L}\p{N}]+/gu) ?? [];
   const long = words.filter((word) => word.length >= 3);
   if (long.length > 0) {
     // The index holds no word under three letters: those are looked for in what it finds.
     const short = words.filter((word) => word.length < 3);
-    const begins = short.map(() => ` AND CONCAT_WS(' ', ${WORD_COLUMNS}) REGEXP ?`).join('');
-    parts.push(
-      `(SELECT id FROM slings WHERE MATCH (${WORD_COLUMNS}) AGAINST (? IN BOOLEAN MODE)${begins} LIMIT ${SEARCH_LIMIT})`,
-    );
-    where.values.push(
+    find(
+      `MATCH (${WORD_COLUMNS}) AGAINST (? IN BOOLEAN MODE)` +
+        short.map(() => ` AND CONCAT_WS(' ', ${WORD_COLUMNS}) REGEXP ?`).join(''),
       long.map((word) => `+${word}*`).join(' '),
       ...short.map((word) => `(^|[^\\p{L}\\p{N}])${word}`),
     );
@@ -139,7 +140,7 @@ function addSearch(where: Where, q: string | undefined): void {
     .replaceAll('O', '0')
     .replace(/[IL]/g, '1');
   if (code.length >= 4) {
-    parts.push(`(SELECT sling_id FROM tags WHERE code LIKE ? LIMIT ${SEARCH_LIMIT})`);
+    parts.push('SELECT sling_id FROM tags WHERE code LIKE ?');
     where.values.push(`${code}%`);
   }
   where.sql.push(`s.id IN (SELECT id FROM (${parts.join(' UNION ')}) AS hits)`);

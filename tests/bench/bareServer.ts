@@ -69,7 +69,7 @@ app.post('/hold/:id', async (request, response) => {
     await connection.rollback();
     throw error;
   } finally {
-    connection.release();
+    await connection.release();
   }
   response.json({ results: results.length });
 });

@@ -95,7 +95,10 @@ function checkClearing({ sling, parts, body }: ActionInput<'release'>): void {
     open.delete(reasonId);
     if (!reason) {
       errors.push({ path: `clear.${index}.reasonId`, message: 'This reason is not open on this sling.' });
-    } else if (clearingOf(reason.code, sling.kind).needsEvidence && !evidenceFileId) {
+    } else if (
+      clearingOf(reason.code, sling.kind, Boolean(reason.confirmed)).needsEvidence &&
+      !evidenceFileId
+    ) {
       errors.push({
         path: `clear.${index}.evidenceFileId`,
         message: `${REASON_FACTS[reason.code].name}: evidence is needed.`,

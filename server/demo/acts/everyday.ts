@@ -61,47 +61,53 @@ export function playInspections(script: Script, random: Random, untilAgo: number
   const firstAgo = script.sling.lot.receivedAgo - 1;
   const periodic: number[] = [];
   for (let ago = firstAgo - PERIOD_DAYS; ago > untilAgo; ago -= PERIOD_DAYS) periodic.push(ago);
-  addInspections(script, periodic, random, untilAgo);
+  addPeriodic(script, periodic);
+  addFrequent(script, random, untilAgo);
 }
 
 /**
  * The inspections of a sling in service to this day.
- * @param nextDueIn days until the next one is due, negative when it is overdue; null when that is left to chance
+ * @param nextDueIn days until the next one is due, negative when it is overdue; null when its lot decides
  */
 export function playInspectionsToDate(script: Script, random: Random, nextDueIn: number | null): void {
-  const firstAgo = script.sling.lot.receivedAgo - 1;
-  if (nextDueIn === null && YEAR_DAYS - firstAgo >= LEAST_DUE_IN) {
-    addInspections(script, [], random, 1);
-    return;
-  }
+  const { receivedAgo, lastInspection } = script.sling.lot;
+  const firstAgo = receivedAgo - 1;
+  addFrequent(script, random, 1);
+  if (nextDueIn === null && YEAR_DAYS - firstAgo >= LEAST_DUE_IN) return;
   const latestAgo = Math.min(YEAR_DAYS - LEAST_DUE_IN, firstAgo - 20);
-  const lastAgo = nextDueIn === null ? random.int(10, latestAgo) : YEAR_DAYS - nextDueIn;
+  const lastAgo =
+    nextDueIn === null ? Math.round(10 + lastInspection * (latestAgo - 10)) : YEAR_DAYS - nextDueIn;
   const steps = Math.ceil((firstAgo - lastAgo) / PERIOD_DAYS);
-  const periodic = Array.from({ length: steps }, (_, index) =>
-    Math.round(firstAgo - ((firstAgo - lastAgo) * (index + 1)) / steps),
+  const dayOfStep = (step: number): number => Math.round(firstAgo - ((firstAgo - lastAgo) * step) / steps);
+  addPeriodic(
+    script,
+    Array.from({ length: steps }, (_, index) => dayOfStep(index + 1)),
   );
-  addInspections(script, periodic, random, 1);
 }
 
-function addInspections(
-  { sling, clock, inspector, secondInspector, add }: Script,
-  periodic: readonly number[],
-  random: Random,
-  untilAgo: number,
-): void {
-  const { receivedAgo, serviceClass } = sling.lot;
-  for (const ago of periodic) {
-    const by = random.pick([inspector, secondInspector]);
-    add(clock.at(ago, random.int(8, 14), random.int(0, 59)), by, (context, world) =>
-      inspect(context, world, sling, 'periodic'),
+function addPeriodic({ sling, clock, inspector, add }: Script, daysAgo: readonly number[]): void {
+  const { place, lot } = sling;
+  const hour = 8 + Math.floor(lot.lastInspection * 6);
+  for (const ago of daysAgo) {
+    add(
+      clock.at(ago, hour, 6 * place + 1),
+      inspector,
+      (context, world) => inspect(context, world, sling, 'periodic'),
+      `periodic ${lot.name}`,
     );
   }
+}
+
+function addFrequent({ sling, clock, inspector, add }: Script, random: Random, untilAgo: number): void {
+  const { receivedAgo, serviceClass } = sling.lot;
   const wanted = FREQUENT_COUNT[serviceClass];
   const count = Math.floor(wanted) + (random.next() < wanted % 1 ? 1 : 0);
-  for (let made = 0; made < count && receivedAgo - 5 > untilAgo; made++) {
-    const ago = random.int(untilAgo + 1, receivedAgo - 4);
-    add(clock.at(ago, 15, random.int(0, 59)), inspector, (context, world) =>
-      inspect(context, world, sling, 'frequent'),
+  if (receivedAgo - 5 <= untilAgo) return;
+  for (let made = 0; made < count; made++) {
+    add(
+      clock.at(random.int(untilAgo + 1, receivedAgo - 4), 15, random.int(0, 59)),
+      inspector,
+      (context, world) => inspect(context, world, sling, 'frequent'),
     );
   }
 }

@@ -15,6 +15,8 @@ export interface DemoLot {
   site: DemoSite;
   receivedAgo: number;
   serviceClass: ServiceClass;
+  /** How far back, from 0 to 1, its last periodic inspection lies: a lot is inspected in one go. */
+  lastInspection: number;
   arrival?: Arrival;
   hire?: { owner: string; offHireAgo: number };
 }
@@ -26,7 +28,7 @@ export interface DemoSling {
   lot: DemoLot;
 }
 
-interface SpecialLot extends Omit<DemoLot, 'name' | 'model' | 'serviceClass'> {
+interface SpecialLot extends Omit<DemoLot, 'name' | 'model' | 'serviceClass' | 'lastInspection'> {
   modelId: string;
 }
 
@@ -58,7 +60,7 @@ const LOT_MOST = 8;
 /** The store was put on the books from the end of its first week on, for half a year. */
 const FIRST_AGO = 720;
 const STOCKED_AGO = 540;
-const STOCKED_SHARE = 0.5;
+const STOCKED_SHARE = 0.45;
 const LAST_AGO = 14;
 
 /** All 420 slings, numbered in the order in which they came in. */
@@ -66,7 +68,13 @@ export function drawFleet(random: Random): DemoSling[] {
   const special = [...ARRIVALS, ...HIRES].map(({ modelId, ...lot }): DemoLot => {
     const model = SLING_MODELS.find(({ id }) => id === modelId);
     if (!model) throw new Error(`There is no model ${modelId}.`);
-    return { ...lot, name: `${modelId} of day ${lot.receivedAgo}`, model, serviceClass: 'normal' };
+    return {
+      ...lot,
+      name: `${modelId} of day ${lot.receivedAgo}`,
+      model,
+      serviceClass: 'normal',
+      lastInspection: random.next(),
+    };
   });
   const lots = [...special, ...drawLots(random, special)].sort((a, b) => b.receivedAgo - a.receivedAgo);
   return lots
@@ -91,6 +99,7 @@ function drawLots(random: Random, special: readonly DemoLot[]): DemoLot[] {
     name: `lot ${index}`,
     receivedAgo: receivedAgo(index / sited.length),
     serviceClass: random.next() < 0.12 ? 'severe' : 'normal',
+    lastInspection: random.next(),
   }));
 }
 

@@ -58,7 +58,7 @@ const noConfirmedReason: Need = ({ openReasons }) => {
 
 const clearableReasons: Need = ({ openReasons, sling }, actor) => {
   for (const reason of openReasons) {
-    const clearing = clearingOf(reason.code, sling.kind);
+    const clearing = clearingOf(reason.code, sling.kind, reason.confirmed);
     const name = REASON_FACTS[reason.code].name;
     if (!clearing.isClearable) return { rule: 'reason_not_clearable', message: `${name}: ${clearing.how}` };
     if (clearing.needsQualified && !actor.designation?.isQualified) {

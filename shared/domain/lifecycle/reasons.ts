@@ -116,8 +116,21 @@ function reason(name: string, facts: Partial<Omit<ReasonFacts, 'name'>> = {}): R
 /** Reasons that a person may choose when holding a sling, in the order of the tiles. */
 export const CHOOSABLE_REASONS = HOLD_REASONS.filter((code) => REASON_FACTS[code].isChoosable);
 
-/** What clears this reason on this kind of sling. */
-export function clearingOf(code: HoldReason, kind: SlingKind): Clearing {
+const withdrawn: Clearing = {
+  ...byInspection,
+  how: 'Withdrawn as error: a passing release inspection and a note.',
+};
+
+/**
+ * What clears this reason on this kind of sling.
+ * @param confirmed false for a rejection that was withdrawn as error: then the rules of release apply, as to any other
+ */
+export function clearingOf(
+  code: HoldReason,
+  kind: SlingKind,
+  confirmed: boolean = REASON_FACTS[code].isConfirmed,
+): Clearing {
+  if (REASON_FACTS[code].isConfirmed && !confirmed) return withdrawn;
   if (code === 'heat_or_chemical' && KIND_FACTS[kind].isSynthetic) return evaluateOrDestroy;
   return REASON_FACTS[code].clearing;
 }

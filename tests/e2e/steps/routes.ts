@@ -10,8 +10,10 @@ import { see } from './screen';
 export interface Look {
   /** As the router has it. */
   route: string;
-  at: string;
-  account: string | null;
+  /** What is special about this look. */
+  face: string;
+  account: Account;
+  at: (made: StoreForLooks) => string;
   ready: string | RegExp;
   prepare?: (page: Page) => Promise<void>;
 }
@@ -22,7 +24,7 @@ export function listRoutes(): string[] {
   return [...source.matchAll(/path: '([^']+)'/g)].map((match) => match[1] ?? '');
 }
 
-interface StoreForLooks {
+export interface StoreForLooks {
   received: Sling;
   inService: Sling;
   held: Sling;
@@ -34,7 +36,7 @@ interface StoreForLooks {
 }
 
 /** A few slings in the states that the pages differ by. */
-async function fillStore(store: TestStore): Promise<StoreForLooks> {
+export async function fillStore(store: TestStore): Promise<StoreForLooks> {
   const work = await openWork(store);
   const received = await work.register({ kind: 'synthetic-web' });
   const inService = await work.inService();
@@ -81,88 +83,167 @@ async function findFirstRow(store: TestStore, sling: Sling): Promise<string> {
   return items[0]?.id ?? '';
 }
 
-/** Looks at every route, at those with several faces several times. */
-export async function prepareLooks(store: TestStore): Promise<Look[]> {
-  const made = await fillStore(store);
-  const { received, inService, held, condemned } = made;
-  const press = (name: string) => (page: Page) => page.getByRole('button', { name }).first().click();
-  const look = (
-    account: string | null,
-    route: string,
-    at: string,
-    ready: string | RegExp,
-    prepare?: Look['prepare'],
-  ): Look => ({ account, route, at, ready, ...(prepare ? { prepare } : {}) });
-  return [
-    look(null, '/sign-in', '/sign-in', 'Show password', async (page) => {
-      await page.getByLabel('E-mail').fill('nobody@marram-quay.example');
-      await page.getByLabel('Password', { exact: true }).fill('wrong password');
-      await press('Sign in')(page);
-      await see(page, 'don’t match an account');
-    }),
-    look(null, '/set-up', '/set-up', 'The store is set up already'),
-    look(null, '/invitation/:token', made.invitation, 'Choose a password'),
-    look(null, '/t/:code', `/t/${inService.tag?.code ?? ''}`, /^USE$/, press('Report damage')),
-    look(null, '/t/:code', `/t/${held.tag?.code ?? ''}`, 'DO NOT USE'),
-    look('storekeeper', '/', '/', 'Scan a label'),
-    look('storekeeper', '/account', '/account', 'What you may do here'),
-    look('storekeeper', '/slings', '/slings', received.number),
-    look('storekeeper', '/slings/new', '/slings/new', 'Identity', async (page) => {
-      await page.getByRole('radio', { name: 'Chain sling' }).check();
-      await page.getByRole('button', { name: 'Add a fitting' }).click();
-      await page.getByLabel('The certificate is at hand').check();
-      await press('Register the sling')(page);
-      await see(page, 'to put right');
-    }),
-    look('storekeeper', '/slings/:id/hold', `/slings/${inService.id}/hold`, 'Why?'),
-    look('storekeeper', '/slings/:id/hold', `/slings/${inService.id}/hold?more`, 'Why?', async (page) => {
+type Account = 'guest' | 'storekeeper' | 'inspector' | 'manager' | 'admin';
+
+const press = (name: string) => (page: Page) => page.getByRole('button', { name }).first().click();
+
+function look(
+  account: Account,
+  route: string,
+  face: string,
+  at: string | Look['at'],
+  ready: string | RegExp,
+  prepare?: Look['prepare'],
+): Look {
+  const address = typeof at === 'string' ? () => at : at;
+  return { account, route, face, at: address, ready, ...(prepare ? { prepare } : {}) };
+}
+
+/** Every route, those with several faces several times; forms with their faults shown. */
+export const LOOKS: readonly Look[] = [
+  look('guest', '/sign-in', 'refused', '/sign-in', 'Show password', async (page) => {
+    await page.getByLabel('E-mail').fill('nobody@marram-quay.example');
+    await page.getByLabel('Password', { exact: true }).fill('wrong password');
+    await press('Sign in')(page);
+    await see(page, 'don’t match an account');
+  }),
+  look('guest', '/set-up', 'over', '/set-up', 'The store is set up already'),
+  look('guest', '/invitation/:token', 'valid', ({ invitation }) => invitation, 'Choose a password'),
+  look(
+    'guest',
+    '/t/:code',
+    'use, with the report',
+    ({ inService }) => tagAddress(inService),
+    /^USE$/,
+    press('Report damage'),
+  ),
+  look('guest', '/t/:code', 'do not use', ({ held }) => tagAddress(held), 'DO NOT USE'),
+  look('storekeeper', '/', 'home', '/', 'Scan a label'),
+  look('storekeeper', '/account', 'own', '/account', 'What you may do here'),
+  look('storekeeper', '/slings', 'register', '/slings', /^TS-/),
+  look('storekeeper', '/slings/new', 'with faults', '/slings/new', 'Identity', async (page) => {
+    await page.getByRole('radio', { name: 'Chain sling' }).check();
+    await press('Add a fitting')(page);
+    await page.getByLabel('The certificate is at hand').check();
+    await press('Register the sling')(page);
+    await see(page, 'to put right');
+  }),
+  look(
+    'storekeeper',
+    '/slings/:id/hold',
+    'one tap',
+    ({ inService }) => `/slings/${inService.id}/hold`,
+    'Why?',
+  ),
+  look(
+    'storekeeper',
+    '/slings/:id/hold',
+    'several reasons',
+    ({ inService }) => `/slings/${inService.id}/hold?more`,
+    'Why?',
+    async (page) => {
       await page.getByRole('checkbox', { name: 'Something else' }).check();
       await press('Hold it')(page);
       await see(page, 'Say what it is.');
-    }),
-    look('storekeeper', '/slings/:id/hold', `/slings/${held.id}/hold?held`, 'Now bring it to the cage'),
-    look(
-      'storekeeper',
-      '/slings/:id/do/:action',
-      `/slings/${condemned.id}/do/destroy`,
-      'Look it over',
-      press('Look it over'),
-    ),
-    look('storekeeper', '/cage', '/cage', held.number),
-    look('storekeeper', '/labels', `/labels?slings=${received.id}`, '2. Choose the label stock'),
-    look('storekeeper', '/labels/:runId', `/labels/${made.runId}`, '1. Print'),
-    look('storekeeper', '/printer-test', '/printer-test', /print/i),
-    look('storekeeper', '/scan', '/scan', 'Hold a label into the frame', async (page) => {
-      await page.getByLabel('Type the code').fill('ABC');
-      await press('Look it up')(page);
-    }),
-    look('storekeeper', '/scan', `/scan?code=${held.tag?.code ?? ''}`, 'DO NOT USE'),
-    look('storekeeper', '*', '/no/such/page', 'This address leads nowhere'),
-    look('inspector', '/slings/:id', `/slings/${inService.id}`, 'What can be done'),
-    look(
-      'inspector',
-      '/slings/:id/inspect',
-      `/slings/${received.id}/inspect`,
-      'Finish and record',
-      async (page) => {
-        await page.getByRole('radio', { name: 'Seen', exact: true }).first().check();
-        await press('Finish and record')(page);
-        await see(page, 'Not answered yet.');
-      },
-    ),
-    look(
-      'inspector',
-      '/slings/:id/inspect',
-      `/slings/${condemned.id}/inspect?recorded=${made.rejectedInspectionId}`,
-      'REJECT',
-    ),
-    look('inspector', '/slings/:id/do/:action', `/slings/${held.id}/do/release`, 'Not open yet'),
-    look('inspector', '/slings/:id/ledger', `/slings/${held.id}/ledger`, 'Damage suspected'),
-    look('manager', '/slings/:id', `/slings/${condemned.id}`, 'What can be done'),
-    look('manager', '/', '/', 'Scan a label'),
-    look('manager', '/slings/:id/do/:action', `/slings/${held.id}/do/condemn`, 'Why it is condemned'),
-    look('admin', '/users', '/users', 'Visiting Inspector'),
-    look('admin', '/users', `/users?person=${made.userId}`, 'Roles', press('Add a designation')),
-    look('admin', '/sites', '/sites', 'Slip Store'),
-  ];
-}
+    },
+  ),
+  look(
+    'storekeeper',
+    '/slings/:id/hold',
+    'held',
+    ({ held }) => `/slings/${held.id}/hold?held`,
+    'Now bring it to the cage',
+  ),
+  look(
+    'storekeeper',
+    '/slings/:id/do/:action',
+    'destroy',
+    ({ condemned }) => `/slings/${condemned.id}/do/destroy`,
+    'Look it over',
+    press('Look it over'),
+  ),
+  look('storekeeper', '/cage', 'full', '/cage', 'Condemned'),
+  look(
+    'storekeeper',
+    '/labels',
+    'chosen',
+    ({ received }) => `/labels?slings=${received.id}`,
+    '2. Choose the label stock',
+  ),
+  look('storekeeper', '/labels/:runId', 'run', ({ runId }) => `/labels/${runId}`, '1. Print'),
+  look('storekeeper', '/printer-test', 'choice', '/printer-test', /print/i),
+  look('storekeeper', '/scan', 'camera', '/scan', 'Hold a label into the frame', async (page) => {
+    await page.getByLabel('Type the code').fill('ABC');
+    await press('Look it up')(page);
+  }),
+  look('storekeeper', '/scan', 'answer', ({ held }) => `/scan?code=${held.tag?.code ?? ''}`, 'DO NOT USE'),
+  look('storekeeper', '*', 'lost', '/no/such/page', 'This address leads nowhere'),
+  look(
+    'inspector',
+    '/slings/:id',
+    'in service',
+    ({ inService }) => `/slings/${inService.id}`,
+    'What can be done',
+  ),
+  look(
+    'inspector',
+    '/slings/:id/inspect',
+    'with faults',
+    ({ received }) => `/slings/${received.id}/inspect`,
+    'Finish and record',
+    async (page) => {
+      await page.getByRole('radio', { name: 'Seen', exact: true }).first().check();
+      await press('Finish and record')(page);
+      await see(page, 'Not answered yet.');
+    },
+  ),
+  look(
+    'inspector',
+    '/slings/:id/inspect',
+    'rejected',
+    ({ condemned, rejectedInspectionId }) =>
+      `/slings/${condemned.id}/inspect?recorded=${rejectedInspectionId}`,
+    'REJECT',
+  ),
+  look(
+    'inspector',
+    '/slings/:id/do/:action',
+    'not open',
+    ({ held }) => `/slings/${held.id}/do/release`,
+    'Not open yet',
+  ),
+  look(
+    'inspector',
+    '/slings/:id/ledger',
+    'held',
+    ({ held }) => `/slings/${held.id}/ledger`,
+    'Damage suspected',
+  ),
+  look(
+    'manager',
+    '/slings/:id',
+    'condemned',
+    ({ condemned }) => `/slings/${condemned.id}`,
+    'What can be done',
+  ),
+  look('manager', '/', 'home', '/', 'Scan a label'),
+  look(
+    'manager',
+    '/slings/:id/do/:action',
+    'condemn',
+    ({ held }) => `/slings/${held.id}/do/condemn`,
+    'Why it is condemned',
+  ),
+  look('admin', '/users', 'everybody', '/users', 'Visiting Inspector'),
+  look(
+    'admin',
+    '/users',
+    'one',
+    ({ userId }) => `/users?person=${userId}`,
+    'Roles',
+    press('Add a designation'),
+  ),
+  look('admin', '/sites', 'own', '/sites', 'Slip Store'),
+];
+
+const tagAddress = (sling: Sling): string => `/t/${sling.tag?.code ?? ''}`;

@@ -1,12 +1,10 @@
 import type { ReactNode } from 'react';
 import type { SlingAction } from '../../../../shared/domain/lifecycle/actions';
-import type { ActionResponse } from '../../../../shared/schemas/actions';
-import type { Location } from '../../../../shared/schemas/places';
-import type { Sling } from '../../../../shared/schemas/slings';
 import { LinkButton } from '../../../components/ui/Button';
 import { Notice } from '../../../components/ui/Notice';
 import { paths } from '../../../config/paths';
 import { DONE_ELSEWHERE } from '../unmetSteps';
+import type { ActFormProps } from '../actFormProps';
 import { DepartForm } from './DepartForm';
 import { DestroyForm } from './DestroyForm';
 import { FoundForm } from './FoundForm';
@@ -14,15 +12,6 @@ import { NotOpen } from './NotOpen';
 import { NoteForm } from './NoteForm';
 import { PlaceForm } from './PlaceForm';
 import { ReleaseForm } from './ReleaseForm';
-
-export interface ActFormProps {
-  sling: Sling;
-  /** All places of the sites where the person works. */
-  locations: readonly Location[];
-  onDone: (answer: ActionResponse) => void;
-  /** Loads the sling as it is now. */
-  onReload: () => Promise<unknown>;
-}
 
 /** The form of one action, or why there is none for this person on this sling now. */
 export function ActForm({ action, ...props }: ActFormProps & { action: SlingAction }): ReactNode {

@@ -10,7 +10,7 @@ import { RadioTiles } from '../../../components/ui/Tiles';
 import { useFormDraft } from '../../../lib/useFormDraft';
 import { buildDestroySchema, OTHER_METHOD, type DestroyValues } from '../destroyValues';
 import { listParts } from '../parts';
-import type { ActFormProps } from './ActForm';
+import type { ActFormProps } from '../actFormProps';
 import { DestroySummary } from './DestroySummary';
 import { PartFates } from './PartFates';
 

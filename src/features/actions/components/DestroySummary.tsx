@@ -9,7 +9,7 @@ import { ACTION_WORDS } from '../actionWords';
 import { useAct } from '../api/actOnSling';
 import { methodOf, type DestroyValues } from '../destroyValues';
 import { toFates, type Part } from '../parts';
-import type { ActFormProps } from './ActForm';
+import type { ActFormProps } from '../actFormProps';
 import { ActProblem } from './ActProblem';
 
 interface DestroySummaryProps extends ActFormProps {

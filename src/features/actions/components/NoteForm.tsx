@@ -9,7 +9,7 @@ import { TextArea } from '../../../components/ui/inputs';
 import { useFormDraft } from '../../../lib/useFormDraft';
 import { ACTION_WORDS } from '../actionWords';
 import { useAct } from '../api/actOnSling';
-import type { ActFormProps } from './ActForm';
+import type { ActFormProps } from '../actFormProps';
 import { ActProblem } from './ActProblem';
 
 export interface NoteFormProps extends ActFormProps {

@@ -2,7 +2,7 @@ import type { ReactNode } from 'react';
 import { Button } from '../../../components/ui/Button';
 import { Notice } from '../../../components/ui/Notice';
 import { useAct } from '../api/actOnSling';
-import type { ActFormProps } from './ActForm';
+import type { ActFormProps } from '../actFormProps';
 import { ActProblem } from './ActProblem';
 import { CageButtons } from './CageButtons';
 

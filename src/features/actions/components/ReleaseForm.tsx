@@ -15,7 +15,7 @@ import { formatDateTime } from '../../../lib/format';
 import { useFormDraft } from '../../../lib/useFormDraft';
 import { ACTION_WORDS } from '../actionWords';
 import { useAct } from '../api/actOnSling';
-import type { ActFormProps } from './ActForm';
+import type { ActFormProps } from '../actFormProps';
 import { ActProblem } from './ActProblem';
 
 const releaseValues = z.object({

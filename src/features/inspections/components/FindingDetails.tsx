@@ -4,8 +4,8 @@ import { PhotoPicker } from '../../../components/ui/PhotoPicker';
 import { LIMITS } from '../../../../shared/limits';
 import { cx } from '../../../lib/cx';
 import { readCelsius, type RowDraft } from '../inspectionDraft';
+import type { QuestionProps } from '../questionProps';
 import { VERDICT_TONES } from '../verdictWords';
-import type { QuestionProps } from './Question';
 
 /** What was seen, in words and pictures, and what the rules make of it. */
 export function FindingDetails({

@@ -1,22 +1,10 @@
 import type { ReactNode } from 'react';
-import type { Finding } from '../../../../shared/domain/inspection/verdict';
 import { FieldError } from '../../../components/ui/Field';
-import { rowKey, type RowDraft } from '../inspectionDraft';
+import { rowKey } from '../inspectionDraft';
 import { questionId } from '../questionId';
-import type { CriterionRowView } from '../rowGroups';
+import type { QuestionProps } from '../questionProps';
 import { FindingDetails } from './FindingDetails';
 import { SeenChoice } from './SeenChoice';
-
-export interface QuestionProps {
-  row: CriterionRowView;
-  draft: RowDraft | undefined;
-  /** What the rules say on the answer so far. */
-  finding: Finding | undefined;
-  /** Set once the inspector tried to finish without it. */
-  error: string | undefined;
-  onAnswer: (part: Partial<RowDraft>) => void;
-  onBusyChange: (isBusy: boolean) => void;
-}
 
 /** One criterion: what to look for, whether it was seen, and the evidence where it was. */
 export function Question({ row, draft, finding, error, onAnswer, onBusyChange }: QuestionProps): ReactNode {

@@ -78,16 +78,9 @@ export const placeOf = ({ state, condemned }: Model): string => (condemned ? `${
 export const allowedFrom = (model: Model): string[] =>
   ACTIONS.filter((action) => TABLE[action]?.from.includes(placeOf(model)));
 
-const NEVER_CLEARED = [
-  'criterion',
-  'unauthorised_repair',
-  'evaluation_unfit',
-  'makers_notice',
-  'identity_unknown',
-];
-
-export function isClearable({ isChain }: Model, code: string): boolean {
-  return !NEVER_CLEARED.includes(code) && (isChain || code !== 'heat_or_chemical');
+/** A rejection is never cleared; once withdrawn as error it is, like any other reason. */
+export function isClearable({ isChain }: Model, { code, confirmed }: Reason): boolean {
+  return !confirmed && (isChain || code !== 'heat_or_chemical');
 }
 export const asksEvidence = (code: string): boolean =>
   code.startsWith('makers_tag_') || code === 'heat_or_chemical';
@@ -121,7 +114,7 @@ export function mayRelease(model: Model, by: string): boolean {
   const after = Math.max(model.cameBack ?? 0, ...model.reasons.map(({ seq }) => seq));
   return (
     model.label === 'live' &&
-    model.reasons.every(({ code, confirmed }) => !confirmed && isClearable(model, code)) &&
+    model.reasons.every((reason) => isClearable(model, reason)) &&
     hasRelease(model, after, by) &&
     (model.lastInService !== null || hasInitial(model)) &&
     (!wasSent(model) || isProvenByEvaluation(model))

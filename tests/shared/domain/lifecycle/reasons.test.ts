@@ -89,4 +89,11 @@ describe('the reasons of a hold', () => {
     expect(isOpenTo(true)).toBe(clears !== 'never');
     expect(isOpenTo(false)).toBe(clears !== 'never' && !clears.includes('qualified'));
   });
+
+  it.each(CONFIRMED)('%s that was withdrawn as error is cleared by the release inspection', (code) => {
+    const isOpen = (confirmed: boolean): boolean =>
+      answerAction('release', held({ openReasons: [reason(code, 6, { confirmed })] }), INSPECTOR).open;
+    expect([isOpen(true), isOpen(false)]).toEqual([false, true]);
+    expect(clearingOf(code, 'alloy-chain', false)).toMatchObject({ isClearable: true, needsEvidence: false });
+  });
 });
