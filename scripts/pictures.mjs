@@ -147,6 +147,11 @@ try {
         const page = await context.newPage();
         for (const { name, to } of wanted) {
           await page.goto(base + to, { waitUntil: 'networkidle' }).catch(() => undefined);
+          await page.waitForFunction(
+            () => document.querySelector('main') !== null && document.querySelector('.skeleton') === null,
+            null,
+            { timeout: 15_000 },
+          );
           await page.waitForTimeout(150);
           const file = isForDocs ? `${name}.png` : `${name}.${size.name}.${colorScheme}.png`;
           await page.screenshot({

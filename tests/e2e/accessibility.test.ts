@@ -42,6 +42,9 @@ const VIEWS = [
   { name: 'desktop, light', viewport: DESK, colorScheme: 'light', isWhole: true },
 ] as const;
 
+/** Places shown of one finding. */
+const MOST_PLACES = 5;
+
 declare global {
   interface Window {
     /** What AxeBuilder leaves in the page. */
@@ -53,15 +56,24 @@ interface Violation {
   id: string;
   impact?: string | null | undefined;
   help: string;
-  nodes: { target: unknown[] }[];
+  nodes: { target: unknown; failureSummary?: string | undefined }[];
 }
 
 /** The first judgement brings axe into the page, which takes longer than to judge; the others find it there. */
 async function judge(page: Page, isFirst: boolean, isWhole: boolean): Promise<Violation[]> {
-  const options = { resultTypes: ['violations'], ...(isWhole ? {} : { runOnly: ['color-contrast'] }) };
+  const options = {
+    resultTypes: ['violations' as const],
+    ...(isWhole ? {} : { runOnly: ['color-contrast'] }),
+  };
   if (!isFirst) return page.evaluate(async (how) => (await window.axe.run(how)).violations, options);
   return (await new AxeBuilder({ page }).setLegacyMode(true).options(options).analyze()).violations;
 }
+
+/** Even the shortest transition shows the old colours until frames were drawn. */
+const settle = (page: Page): Promise<void> =>
+  page.evaluate(
+    () => new Promise((resolve) => requestAnimationFrame(() => requestAnimationFrame(() => resolve()))),
+  );
 
 /** Serious and critical findings, each with the view, the rule and the elements. */
 async function listFindings(page: Page): Promise<string[]> {
@@ -69,9 +81,12 @@ async function listFindings(page: Page): Promise<string[]> {
   for (const [i, { name, viewport, colorScheme, isWhole }] of VIEWS.entries()) {
     await page.setViewportSize(viewport);
     await page.emulateMedia({ colorScheme, reducedMotion: 'reduce' });
+    await settle(page);
     for (const { id, impact, help, nodes } of await judge(page, i === 0, isWhole)) {
       if (impact !== 'serious' && impact !== 'critical') continue;
-      found.push(`${name}: ${id} (${help}) at ${nodes.map(({ target }) => target.join(' ')).join(' | ')}`);
+      for (const { target, failureSummary = '' } of nodes.slice(0, MOST_PLACES)) {
+        found.push(`${name}: ${id} (${help}) at ${String(target)}: ${failureSummary.replace(/\s+/g, ' ')}`);
+      }
     }
   }
   return found;
