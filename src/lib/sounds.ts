@@ -51,11 +51,15 @@ export function unlockSounds(): void {
   if (context.state === 'suspended') context.resume().catch(() => undefined);
 }
 
+/** Before the first tap browsers refuse to vibrate, and log that as an error. */
+const mayVibrate = (): boolean =>
+  'vibrate' in navigator && (!('userActivation' in navigator) || navigator.userActivation.hasBeenActive);
+
 /** Sounds and vibrates at once, or does nothing where switched off or not possible. */
 export function playScanTone(tone: ScanTone): void {
   if (!isSoundOn()) return;
   const { beeps, vibrationMs } = TONES[tone];
-  if ('vibrate' in navigator) navigator.vibrate([...vibrationMs]);
+  if (mayVibrate()) navigator.vibrate([...vibrationMs]);
   unlockSounds();
   if (!context) return;
   for (const beep of beeps) playBeep(context, beep);

@@ -131,6 +131,18 @@ describe('the demo', () => {
     expect(shipments.filter((shipment) => shipment.expectedBackOn < today)).toHaveLength(1);
   });
 
+  it('has every outcome that an evaluator gives, and the proof test of what was repaired', async () => {
+    const lines = await ShipmentLine.findAll();
+    const outcomes = lines.map((line) => line.outcome ?? 'out').sort();
+    expect(outcomes.join(' ')).toBe(
+      'destroyed destroyed fit fit fit out out out out out repaired repaired unfit',
+    );
+    for (const line of lines.filter(({ outcome }) => outcome === 'repaired')) {
+      expect(line.proofLoadKg).not.toBeNull();
+      expect(line.repairer).toBe('Tarn Forge Service');
+    }
+  });
+
   it('leaves a ledger that holds, in the order of time, with nothing in the future', async () => {
     const sites = await Site.findAll();
     const verified = await verifyLedger(sites.map((site) => site.id));

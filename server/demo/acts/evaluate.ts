@@ -1,4 +1,4 @@
-import type { EVALUATION_OUTCOMES } from '../../../shared/domain/lifecycle/facts';
+import type { EvaluationOutcome } from '../../../shared/domain/lifecycle/facts';
 import { requiredProofLoadKg } from '../../../shared/domain/quarantine/proofLoad';
 import { confirmDestroyed, recordOutcome } from '../../commands/recordOutcome';
 import { createShipment, sendShipment } from '../../commands/shipSlings';
@@ -18,9 +18,7 @@ export interface ShippedSling {
   note: string;
 }
 
-type Outcome = (typeof EVALUATION_OUTCOMES)[number];
-
-const OUTCOME_SENTENCES: Record<Outcome, string> = {
+const OUTCOME_SENTENCES: Record<EvaluationOutcome, string> = {
   fit: 'examined, no defect found: fit for use at its rated load.',
   repaired: 'damaged parts replaced with our own, proof tested: fit for use at its rated load.',
   unfit: 'worn beyond repair: unfit for use.',

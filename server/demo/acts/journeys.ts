@@ -2,6 +2,7 @@ import { getCause } from '../plan/causes';
 import type { Life } from '../plan/allocate';
 import { SHIPMENT_IDS, SHIPMENTS, type DemoShipment } from '../plan/shipments';
 import { STAFF } from '../plan/staff';
+import { HOLD_CASES } from '../plan/holdCases';
 import type { DemoClock } from '../clock';
 import { confirmScrapped, report, ship, type ShippedSling } from './evaluate';
 import { inspect } from './inspect';
@@ -24,10 +25,11 @@ export function playShipments(
     const plan = SHIPMENTS[id];
     const travellers = lives.flatMap((life) => {
       const script = scripts.get(life);
-      const isOn =
-        life.story.type === 'held' && life.story.case.then === 'shipped' && life.story.case.shipment === id;
-      return script && isOn && life.story.type === 'held' ? [{ script, hold: life.story.case }] : [];
+      const hold = life.story.type === 'held' ? life.story.case : null;
+      return script && hold?.then === 'shipped' && hold.shipment === id ? [{ script, hold }] : [];
     });
+    // The fates stand in the order of the cases.
+    travellers.sort((a, b) => HOLD_CASES.indexOf(a.hold) - HOLD_CASES.indexOf(b.hold));
     const slings = travellers.flatMap(({ script, hold }, index): (ShippedSling & { script: Script })[] => {
       const fate = plan.fates[index];
       return fate ? [{ script, sling: script.sling, fate, note: getCause(hold.cause).note }] : [];

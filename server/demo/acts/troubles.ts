@@ -1,11 +1,12 @@
-import type { HoldCase, OtherCase } from '../plan/cases';
 import { getCause } from '../plan/causes';
+import type { HoldCase } from '../plan/holdCases';
+import type { OtherCase } from '../plan/otherCases';
 import { label, confirm } from './begin';
 import { inspect } from './inspect';
 import { act, destroy, doubt, release, secure } from './quarantine';
 import type { Script } from './script';
 
-const CONDEMN_NOTES = 'Not worth an evaluation: it goes.';
+const CONDEMN_NOTE = 'Not worth an evaluation: it goes.';
 
 /** From the doubt to whatever came of it; what a shipment brings is played with the shipment. */
 export function playHold(script: Script, hold: HoldCase): void {
@@ -26,7 +27,7 @@ export function playHold(script: Script, hold: HoldCase): void {
     case 'destroyed': {
       const condemnedAgo = hold.ago - hold.after;
       add(clock.at(condemnedAgo, 14, 10), manager, (context, world) =>
-        act(context, world, sling, 'condemn', { note: CONDEMN_NOTES }),
+        act(context, world, sling, 'condemn', { note: CONDEMN_NOTE }),
       );
       if (hold.then === 'destroyed') playDestruction(script, condemnedAgo - hold.destroyedAfter);
     }

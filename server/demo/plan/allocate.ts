@@ -1,7 +1,8 @@
 import type { SlingKind } from '../../../shared/domain/slings/kinds';
 import type { Random } from '../random';
-import { HOLD_CASES, OTHER_CASES, type HoldCase, type OtherCase } from './cases';
 import type { DemoSling } from './fleet';
+import { HOLD_CASES, type HoldCase } from './holdCases';
+import { OTHER_CASES, type OtherCase } from './otherCases';
 import type { DemoSite } from './staff';
 
 /** What a sling's years were like. Sling and story belong together one to one. */

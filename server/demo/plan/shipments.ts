@@ -6,7 +6,7 @@ interface DemoEvaluator {
   name: string;
   email: string;
   isMaker: boolean;
-  mayRepair: SlingKind[];
+  mayRepair: readonly SlingKind[];
 }
 
 export const EVALUATORS = {
@@ -22,7 +22,7 @@ export const EVALUATORS = {
     isMaker: true,
     mayRepair: ['alloy-chain'],
   },
-} as const satisfies Record<string, Omit<DemoEvaluator, 'mayRepair'> & { mayRepair: readonly SlingKind[] }>;
+} as const satisfies Record<string, DemoEvaluator>;
 
 export const SHIPMENT_IDS = [
   'spring',

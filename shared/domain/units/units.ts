@@ -31,8 +31,8 @@ const LENGTH_DECIMALS: Record<LengthUnit, number> = { mm: 1, m: 2, in: 3, ft: 2 
 /** A load as read: rounded down always, so that nothing shown is ever more than what the sling may carry. */
 export function formatLoad(kg: number, unit: LoadUnit): string {
   const scale = 10 ** LOAD_DECIMALS[unit];
-  // 1e-6 absorbs binary noise such as 2000 lb stored as 907.18474 kg
-  const down = Math.floor(fromKg(kg, unit) * scale + 1e-6) / scale;
+  // Kept to 0.00001 kg, 5300 lb come back as 5299.999997: half such a step is 0.000011 lb.
+  const down = Math.floor(fromKg(kg, unit) * scale + 2e-5) / scale;
   return `${group(down, LOAD_DECIMALS[unit])} ${UNIT_SIGNS[unit]}`;
 }
 

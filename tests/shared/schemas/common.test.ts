@@ -16,7 +16,11 @@ describe('a text', () => {
       .string({ unit: 'grapheme', maxLength: 30 })
       // Control characters are refused on purpose.
       .filter((value) => !/\p{Cc}/u.test(value));
-    fc.assert(fc.property(words, (value) => expect(text(500).parse(value)).toBe(value.trim())));
+    fc.assert(
+      fc.property(words, (value) => {
+        expect(text(500).parse(value)).toBe(value.trim());
+      }),
+    );
     expect(text(80).parse('  حبل 🪝 <b>\n\tx ')).toBe('حبل 🪝 <b>\n\tx');
   });
 
