@@ -148,7 +148,7 @@ try {
         for (const { name, to } of wanted) {
           await page.goto(base + to, { waitUntil: 'networkidle' }).catch(() => undefined);
           await page.waitForFunction(
-            () => document.querySelector('main') !== null && document.querySelector('.skeleton') === null,
+            "document.querySelector('main') !== null && document.querySelector('.skeleton') === null",
             null,
             { timeout: 15_000 },
           );

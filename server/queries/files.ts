@@ -37,6 +37,7 @@ export async function getPhotos(
   fileIds: readonly string[],
   path: string,
 ): Promise<Evidence[]> {
+  if (fileIds.length === 0) return [];
   const evidence = await getEvidence(context, fileIds, path);
   const others = await FileRecord.count({
     where: { id: evidence.map((file) => file.fileId), contentType: 'application/pdf' },

@@ -28,11 +28,13 @@ export const fromMm = (mm: number, unit: LengthUnit): number => mm / MM_PER[unit
 const LOAD_DECIMALS: Record<LoadUnit, number> = { kg: 0, t: 2, lb: 0, short_ton: 2 };
 const LENGTH_DECIMALS: Record<LengthUnit, number> = { mm: 1, m: 2, in: 3, ft: 2 };
 
+/** Loads are kept to so much: without it, 5300 lb would come back as 5299. */
+const KEPT_STEP_KG = 0.00001;
+
 /** A load as read: rounded down always, so that nothing shown is ever more than what the sling may carry. */
 export function formatLoad(kg: number, unit: LoadUnit): string {
   const scale = 10 ** LOAD_DECIMALS[unit];
-  // Kept to 0.00001 kg, 5300 lb come back as 5299.999997: half such a step is 0.000011 lb.
-  const down = Math.floor(fromKg(kg, unit) * scale + 2e-5) / scale;
+  const down = Math.floor(fromKg(kg + KEPT_STEP_KG, unit) * scale) / scale;
   return `${group(down, LOAD_DECIMALS[unit])} ${UNIT_SIGNS[unit]}`;
 }
 

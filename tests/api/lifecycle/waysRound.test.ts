@@ -125,17 +125,25 @@ describe('what each reason asks', () => {
     expect(unmetRules(await release(sling))).toContain('confirmed_reason');
   });
 
-  it.each(['makers_tag_missing', 'makers_tag_illegible'])(
-    'wants evidence of the new tag for %s and then shows it legible',
-    async (code) => {
+  it.each(['missing', 'illegible'] as const)(
+    'wants evidence of the new tag for a maker’s tag that is %s, and then shows it legible',
+    async (makersTag) => {
       const { work } = scenes;
-      const sling = await scenes.held(code);
+      const sling = await work.register({ makersTag });
+      await work.confirm(sling, await work.label(sling));
+      await work.inspect(sling, 'initial');
+      const reasons = [{ code: `makers_tag_${makersTag}` }];
+      await work.act('storekeeper', sling, 'hold', { reasons });
       await work.inspect(sling, 'release');
       const without = await release(sling);
       expect(without.status).toBe(422);
       expect(errorPaths(without)).toEqual(['clear.0.evidenceFileId']);
       expectStatus(await release(sling, 'inspector', await work.photo()), 200);
-      expect(await work.read(sling.id)).toMatchObject({ state: 'in_service', makersTag: 'legible' });
+      expect(await work.read(sling.id)).toMatchObject({
+        state: 'in_service',
+        makersTag: 'legible',
+        mayUse: true,
+      });
     },
   );
 
