@@ -2,19 +2,15 @@ import { spawn } from 'node:child_process';
 import { once } from 'node:events';
 import path from 'node:path';
 import { describe, expect, it } from 'vitest';
+import { readBirth } from '../../scripts/lib/lock.mjs';
 import { run, startProcess, stopProcess } from '../../scripts/lib/processes.mjs';
 
 const node = (code: string) => run(process.execPath, ['-e', code]);
 
 const library = path.resolve(import.meta.dirname, '../../scripts/lib');
 
-function isAlive(pid: number): boolean {
-  try {
-    return process.kill(pid, 0);
-  } catch {
-    return false;
-  }
-}
+/** One that ended but whose new parent hasn't asked for it yet is gone. */
+const isAlive = (pid: number): boolean => readBirth(pid) !== null;
 
 async function waitUntilGone(pid: number): Promise<boolean> {
   for (let waits = 0; waits < 100 && isAlive(pid); waits += 1)
