@@ -99,7 +99,7 @@ async function verifyChains(
   let slings = 0;
   for (let after = 0; ;) {
     const batch = await SlingRecord.findAll({
-      attributes: ['id', 'ledgerCount', 'headHash'],
+      attributes: ['id', 'ledgerCount', 'headHash', 'state', 'condemned', 'custodyKind', 'custodyLocationId'],
       where: {
         siteId: [...siteIds],
         id: slingId === undefined ? { [Op.gt]: after } : slingId,
@@ -125,6 +125,7 @@ async function verifyChain(
   transaction: Transaction,
 ): Promise<{ rows: number; fault: { slingSeq: number; message: string } | null }> {
   let head = { seq: 0, hash: CHAIN_START };
+  let last: LedgerEntry | null = null;
   for (;;) {
     const entries = await LedgerEntry.findAll({
       where: { slingId: sling.id, slingSeq: { [Op.gt]: head.seq } },
@@ -139,6 +140,7 @@ async function verifyChain(
     );
     if (result.fault) return { rows: head.seq, fault: result.fault };
     head = result;
+    last = entries.at(-1) ?? last;
     if (entries.length < BATCH) break;
   }
   if (head.seq !== sling.ledgerCount || head.hash !== sling.headHash) {
@@ -150,5 +152,21 @@ async function verifyChain(
       },
     };
   }
+  if (last && !isWhereRowSays(sling, last)) {
+    return {
+      rows: head.seq,
+      fault: { slingSeq: head.seq, message: 'The sling’s state or place is not what its last row says.' },
+    };
+  }
   return { rows: head.seq, fault: null };
+}
+
+/** The record itself could have been changed past its guards, with every row left as it was. */
+function isWhereRowSays(sling: SlingRecord, row: LedgerEntry): boolean {
+  return (
+    sling.state === row.toState &&
+    Boolean(sling.condemned) === Boolean(row.condemned) &&
+    sling.custodyKind === row.custodyKind &&
+    sling.custodyLocationId === row.custodyLocationId
+  );
 }

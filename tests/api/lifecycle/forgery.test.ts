@@ -57,6 +57,17 @@ describe('a forger who may drop triggers', () => {
     expect((await verifyLedger(scenes.store)).ok).toBe(false);
   });
 
+  it.each(["state = 'in_service'", 'condemned = 1', "custody_kind = 'cage'"])(
+    'is found when the record alone is changed: %s',
+    async (assignment) => {
+      const sling = await fresh();
+      await forge(scenes.store, `UPDATE slings SET ${assignment} WHERE id = ${sling.id}`);
+      const found = await verifyLedger(scenes.store, sling.id);
+      expect(found.ok).toBe(false);
+      expect(found.firstBad?.message).toMatch(/not what its last row says/);
+    },
+  );
+
   it('is found and named when a row is taken out, the first, one between or the last', async () => {
     for (const which of ['first', 'middle', 'last'] as const) {
       const sling = await fresh();
