@@ -22,20 +22,26 @@ export interface SlingParts {
   line: ShipmentLine | null;
 }
 
-/** Everything that the lifecycle rules look at, besides the sling's own row. */
+/** Everything that the lifecycle rules look at, besides the sling's own row. Plain rows: each scan reads them. */
 export async function loadSlingParts(sling: SlingRecord, transaction?: Transaction): Promise<SlingParts> {
   const where = { slingId: sling.id };
   const options = transaction ? { transaction } : {};
   const [openReasons, certificates, inspections, liveTag, line] = await Promise.all([
-    HoldReasonRow.findAll({ where: { ...where, clearedAt: null }, order: [['id', 'ASC']], ...options }),
-    Certificate.findAll({ where, order: [['id', 'ASC']], ...options }),
+    HoldReasonRow.findAll({
+      where: { ...where, clearedAt: null },
+      order: [['id', 'ASC']],
+      raw: true,
+      ...options,
+    }),
+    Certificate.findAll({ where, order: [['id', 'ASC']], raw: true, ...options }),
     Inspection.findAll({
       attributes: ['id', 'type', 'inspectorId', 'ledgerSeq', 'verdict', 'isComplete'],
       where: { ...where, type: { [Op.in]: ['initial', 'periodic', 'release'] } },
       order: [['ledgerSeq', 'ASC']],
+      raw: true,
       ...options,
     }),
-    Tag.findOne({ where: { ...where, status: 'live' }, ...options }),
+    Tag.findOne({ where: { ...where, status: 'live' }, raw: true, ...options }),
     sling.lastSentSeq === null
       ? null
       : ShipmentLine.findOne({ where: { ...where, sentSeq: sling.lastSentSeq }, ...options }),

@@ -25,8 +25,8 @@ export async function getSling(
   const [record, summary, fittings, photos] = await Promise.all([
     SlingRecord.findByPk(id, options),
     findSummary(context.sequelize, id, transaction),
-    Fitting.findAll({ where, order: [['id', 'ASC']], ...options }),
-    SlingPhoto.findAll({ where, order: [['createdAt', 'ASC']], ...options }),
+    Fitting.findAll({ where, order: [['id', 'ASC']], raw: true, ...options }),
+    SlingPhoto.findAll({ where, order: [['createdAt', 'ASC']], raw: true, ...options }),
   ]);
   if (!record || !summary || !context.user.siteIds.includes(record.siteId)) throw new NotFoundError('sling');
   const at = context.now();
